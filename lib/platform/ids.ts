@@ -11,3 +11,6 @@ export const hashToken = (token: string): string => createHash('sha256').update(
 
 /** SHA-256 of bytes or text in hexadecimal. */
 export const sha256 = (data: string | Uint8Array): string => createHash('sha256').update(data).digest('hex');
+
+/** SHA-256 of text as its 32 bytes. */
+export const sha256Bytes = (data: string): Uint8Array => createHash('sha256').update(data).digest();

@@ -1,0 +1,87 @@
+import type { z } from 'zod';
+import { insertAuditEvent } from '@/db/queries/audit';
+import {
+  deleteBatch,
+  lockBatch,
+  lockBatchRosters,
+  replaceBatchRosters,
+  updateHeldBatch,
+  type BatchRow,
+} from '@/db/queries/batches';
+import { withLeague, type LeagueTx } from '@/db/tenant';
+import { listDifferences } from '@/lib/domain/audit/event';
+import { AppError, notFound } from '@/lib/platform/errors';
+import { assertCan, type ActorContext } from '../context';
+import type { changeBatchSchema } from './batch-schemas';
+import { assertShop, pickReadyTeams } from './hold-batch';
+
+/** Changes the teams, the shop or the promised day of a batch that is still held. */
+export async function changeBatch(
+  ctx: ActorContext,
+  input: z.output<typeof changeBatchSchema>,
+): Promise<{ code: string }> {
+  assertCan(ctx.actor, 'batch.make');
+  return withLeague(ctx.league.id, async (tx) => {
+    const batch = await lockHeldBatch(tx, input.batchId);
+    await assertShop(tx, input.shopId);
+    const before = (await lockBatchRosters(tx, batch.id)).map((roster) => roster.team);
+    const teams = await pickReadyTeams(tx, batch.seasonId, input.teamIds, batch.id);
+    const changed = await updateHeldBatch(tx, {
+      id: batch.id,
+      rowVersion: input.rowVersion,
+      shopId: input.shopId,
+      promisedOn: input.promisedOn,
+    });
+    if (!changed) {
+      throw new AppError(
+        'conflict',
+        `Batch ${batch.code} was changed since you opened it. Your choices are still here; reload to see the other change.`,
+      );
+    }
+    await replaceBatchRosters(
+      tx,
+      batch.id,
+      teams.map((team) => team.roster.id),
+    );
+    const changes = listDifferences(
+      { teams: before, shop: batch.shop.id, promisedOn: batch.promisedOn },
+      { teams: teams.map((team) => team.name).sort(), shop: input.shopId, promisedOn: input.promisedOn },
+    );
+    if (changes) {
+      await insertAuditEvent(
+        tx,
+        { ...ctx, userId: ctx.actor.userId },
+        { type: 'batch changed', subjectId: batch.id, data: { code: batch.code, changes } },
+      );
+    }
+    return { code: batch.code };
+  });
+}
+
+/** Discards a held batch: its teams can go into another one. */
+export async function discardBatch(ctx: ActorContext, input: { batchId: string }): Promise<{ code: string }> {
+  assertCan(ctx.actor, 'batch.make');
+  return withLeague(ctx.league.id, async (tx) => {
+    const batch = await lockHeldBatch(tx, input.batchId);
+    await deleteBatch(tx, batch.id);
+    await insertAuditEvent(
+      tx,
+      { ...ctx, userId: ctx.actor.userId },
+      { type: 'batch discarded', subjectId: batch.id, data: { code: batch.code } },
+    );
+    return { code: batch.code };
+  });
+}
+
+/** Locks a batch that must still be held; a released one is `locked`. */
+export async function lockHeldBatch(tx: LeagueTx, batchId: string): Promise<BatchRow> {
+  const batch = await lockBatch(tx, batchId);
+  if (!batch) throw notFound('batch');
+  if (batch.state !== 'held') {
+    throw new AppError(
+      'locked',
+      `Batch ${batch.code} is ${batch.state}. What a shop has been given no longer changes.`,
+    );
+  }
+  return batch;
+}

@@ -1,0 +1,29 @@
+import { findBatchById } from '@/db/queries/batches';
+import { lockBundle, updateBundleState } from '@/db/queries/bundles';
+import { enqueueJob } from '@/db/queries/jobs';
+import { withLeague } from '@/db/tenant';
+import { AppError, notFound } from '@/lib/platform/errors';
+import { assertCan, type ActorContext } from '../context';
+
+/** Queues another try of a bundle that failed; what was finished is kept. */
+export async function rebuildBundle(
+  ctx: ActorContext,
+  input: { batchId: string },
+): Promise<{ queued: true }> {
+  return withLeague(ctx.league.id, async (tx) => {
+    const batch = await findBatchById(tx, input.batchId);
+    if (!batch) throw notFound('batch');
+    assertCan(ctx.actor, 'batch.read', { shopId: batch.shop.id, what: 'batch' });
+    const bundle = await lockBundle(tx, input.batchId);
+    if (!bundle) throw notFound('bundle');
+    if (bundle.state !== 'failed')
+      throw new AppError('conflict', `The bundle is ${bundle.state}; there is nothing to try again.`);
+    await updateBundleState(tx, bundle.id, { state: 'queued', now: ctx.now });
+    await enqueueJob(
+      tx,
+      { task: 'build-bundle', payload: { leagueId: ctx.league.id, batchId: batch.id } },
+      { key: `bundle:${batch.id}`, runAt: null },
+    );
+    return { queued: true };
+  });
+}
