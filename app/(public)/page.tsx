@@ -1,0 +1,3 @@
+export default function LandingPage() {
+  return <h1 className="type-page">Raglan</h1>;
+}
