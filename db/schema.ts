@@ -72,6 +72,15 @@ interface PasswordResetsTable {
   expires_at: Time;
   used_at: NullableTime;
 }
+interface SignUpsTable {
+  id: string;
+  email: string;
+  name: string;
+  token_hash: string;
+  created_at: Time;
+  expires_at: Time;
+  used_at: NullableTime;
+}
 interface EmailsTable {
   id: string;
   to_address: string;
@@ -299,6 +308,7 @@ export interface Database {
   memberships: MembershipsTable;
   invitations: InvitationsTable;
   password_resets: PasswordResetsTable;
+  sign_ups: SignUpsTable;
   emails: EmailsTable;
   audit_events: AuditEventsTable;
   system_events: SystemEventsTable;
