@@ -5,21 +5,24 @@ import { useRouter } from 'next/navigation';
 import { useEffect, useRef, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
+import { Progress } from '@/components/ui/progress';
 import type { BundleProgress } from '@/lib/domain/batch/bundle-progress';
 
 /**
  * How far a bundle is, asked for every second while it is being made; the page is read again when it is ready. It may
- * be left: the worker goes on. Props: `stateUrl`, the `initial` progress, `onRetry` when a failed build may be tried
- * again (answers with a sentence when that failed).
+ * be left: the worker goes on. Props: `stateUrl`, the `initial` progress, `batchId` and `onRetry` to try a
+ * failed build again.
  */
 export function BundlePanel({
   stateUrl,
+  batchId,
   initial,
   onRetry,
 }: {
   stateUrl: string;
   initial: BundleProgress;
-  onRetry: () => Promise<string | undefined>;
+  batchId: string;
+  onRetry: (input: { batchId: string }) => Promise<{ ok: true } | { ok: false; error: { message: string } }>;
 }) {
   const router = useRouter();
   const [retrying, setRetrying] = useState(false);
@@ -46,7 +49,8 @@ export function BundlePanel({
   if (data.state === 'failed') {
     const retry = async () => {
       setRetrying(true);
-      setFailure(await onRetry());
+      const answer = await onRetry({ batchId });
+      setFailure(answer.ok ? undefined : answer.error.message);
       setRetrying(false);
       await refetch();
     };
@@ -65,27 +69,19 @@ export function BundlePanel({
       </Notice>
     );
   }
-  const says =
-    data.state === 'queued'
-      ? 'Waiting for a worker to take it.'
-      : `${data.doing}: ${data.done} of ${data.total} steps`;
   return (
-    <div className="px-4 py-4">
-      <p className="font-[600]">The bundle is being made</p>
-      <p className="text-dusk type-small mt-0.5">{says}</p>
-      <progress
-        className="bundle-progress mt-3 block w-full"
-        max={Math.max(data.total, 1)}
-        value={data.done}
-        aria-label="Bundle"
-      >
-        {data.done} of {data.total}
-      </progress>
-      <p className="type-fine text-dusk mt-2" role="status">
-        {isError
-          ? 'The connection is lost; asking again.'
-          : 'You can leave this page; it goes on without you.'}
-      </p>
+    <div className="p-4" role="status">
+      <Progress
+        label={data.state === 'queued' ? 'The bundle waits for a worker' : `Making: ${data.doing}`}
+        done={data.done}
+        total={data.total === 0 ? null : data.total}
+        unit="steps"
+        hint={
+          isError
+            ? 'The connection is lost; asking again.'
+            : 'You can leave this page; it goes on without you.'
+        }
+      />
     </div>
   );
 }

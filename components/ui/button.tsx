@@ -89,6 +89,24 @@ export function ButtonLink({
   );
 }
 
+/** The same for a file to keep: a plain link, since a router must neither prefetch nor render it. Props: as ButtonLink. */
+export function DownloadLink({
+  look = 'secondary',
+  size = 'md',
+  icon,
+  wide,
+  children,
+  className,
+  ...rest
+}: Shared & Omit<ComponentProps<'a'>, 'children'>) {
+  return (
+    <a download {...rest} className={joinClasses(shape(size, wide), looks[look], className)}>
+      {icon !== undefined && <Icon name={icon} />}
+      {children}
+    </a>
+  );
+}
+
 const shape = (size: ButtonSize, wide: boolean | undefined) =>
   joinClasses(
     'inline-flex items-center justify-center gap-2 rounded-control border text-center font-[600] no-underline transition-colors select-none print:hidden',

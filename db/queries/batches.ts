@@ -1,3 +1,4 @@
+import { sql } from 'kysely';
 import type { BatchSnapshot } from '@/lib/domain/batch/batch-snapshot';
 import type { BatchState } from '@/lib/domain/batch/batch-state';
 import type { LeagueTx, UserTx } from '../tenant';
@@ -300,7 +301,7 @@ export async function listBatchesOfMyShops(tx: UserTx) {
     .leftJoin('bundles as z', (join) =>
       join.onRef('z.league_id', '=', 'b.league_id').onRef('z.batch_id', '=', 'b.id'),
     )
-    .select((eb) => [
+    .select([
       'b.id',
       'b.code',
       'b.state',
@@ -312,11 +313,9 @@ export async function listBatchesOfMyShops(tx: UserTx) {
       'z.state as bundleState',
       'z.done',
       'z.total',
-      eb.fn<number>('jsonb_array_length', [eb.ref('b.snapshot', '->').key('teams' as never)]).as('teams'),
-      eb
-        .ref('b.snapshot', '->')
-        .key('batch' as never)
-        .as('snapshotBatch'),
+      // Names come from the snapshot: other tables of a league are closed to a view over leagues.
+      sql<number>`jsonb_array_length(b.snapshot -> 'teams')`.as('teams'),
+      sql<string>`b.snapshot -> 'batch' ->> 'shop'`.as('shop'),
     ])
     .where('b.state', '!=', 'held')
     .orderBy('b.released_at', 'desc')

@@ -1,19 +1,12 @@
 import type { z } from 'zod';
 import { insertAuditEvent } from '@/db/queries/audit';
-import {
-  deleteBatch,
-  lockBatch,
-  lockBatchRosters,
-  replaceBatchRosters,
-  updateHeldBatch,
-  type BatchRow,
-} from '@/db/queries/batches';
-import { withLeague, type LeagueTx } from '@/db/tenant';
+import { lockBatchRosters, replaceBatchRosters, updateHeldBatch } from '@/db/queries/batches';
+import { withLeague } from '@/db/tenant';
 import { listDifferences } from '@/lib/domain/audit/event';
-import { AppError, notFound } from '@/lib/platform/errors';
+import { AppError } from '@/lib/platform/errors';
+import { assertShop, lockHeldBatch, pickReadyTeams } from '../batch-guards';
 import { assertCan, type ActorContext } from '../context';
 import type { changeBatchSchema } from './batch-schemas';
-import { assertShop, pickReadyTeams } from './hold-batch';
 
 /** Changes the teams, the shop or the promised day of a batch that is still held. */
 export async function changeBatch(
@@ -56,32 +49,4 @@ export async function changeBatch(
     }
     return { code: batch.code };
   });
-}
-
-/** Discards a held batch: its teams can go into another one. */
-export async function discardBatch(ctx: ActorContext, input: { batchId: string }): Promise<{ code: string }> {
-  assertCan(ctx.actor, 'batch.make');
-  return withLeague(ctx.league.id, async (tx) => {
-    const batch = await lockHeldBatch(tx, input.batchId);
-    await deleteBatch(tx, batch.id);
-    await insertAuditEvent(
-      tx,
-      { ...ctx, userId: ctx.actor.userId },
-      { type: 'batch discarded', subjectId: batch.id, data: { code: batch.code } },
-    );
-    return { code: batch.code };
-  });
-}
-
-/** Locks a batch that must still be held; a released one is `locked`. */
-export async function lockHeldBatch(tx: LeagueTx, batchId: string): Promise<BatchRow> {
-  const batch = await lockBatch(tx, batchId);
-  if (!batch) throw notFound('batch');
-  if (batch.state !== 'held') {
-    throw new AppError(
-      'locked',
-      `Batch ${batch.code} is ${batch.state}. What a shop has been given no longer changes.`,
-    );
-  }
-  return batch;
 }

@@ -1,31 +1,14 @@
-import {
-  findBatch,
-  findSnapshot,
-  listBatchEvents,
-  listBatchRosters,
-  type BatchRow,
-} from '@/db/queries/batches';
+import { findSnapshot, listBatchEvents, listBatchRosters } from '@/db/queries/batches';
 import { findBundle, listBundleParts } from '@/db/queries/bundles';
-import { withLeague, type LeagueTx } from '@/db/tenant';
+import { withLeague } from '@/db/tenant';
+import type { BundleProgress } from '@/lib/domain/batch/bundle-progress';
 import { can } from '@/lib/domain/access/permissions';
 import { listPieces } from '@/lib/domain/packing/list-pieces';
 import { pullDigits } from '@/lib/domain/packing/pull-digits';
 import { pullGarments } from '@/lib/domain/packing/pull-garments';
-import { AppError, notFound } from '@/lib/platform/errors';
-import { assertCan, type ActorContext } from '../context';
-
-/**
- * The batch with this code, for those who may see it: the league, or the decorators of its shop once it is released.
- * To everybody else it does not exist.
- */
-export async function findVisibleBatch(tx: LeagueTx, ctx: ActorContext, code: string): Promise<BatchRow> {
-  const batch = await findBatch(tx, code);
-  if (!batch) throw notFound('batch');
-  if (can(ctx.actor, 'batch.make')) return batch;
-  assertCan(ctx.actor, 'batch.read', { shopId: batch.shop.id, what: 'batch' });
-  if (batch.state === 'held') throw notFound('batch');
-  return batch;
-}
+import { AppError } from '@/lib/platform/errors';
+import { findVisibleBatch } from '../batch-guards';
+import type { ActorContext } from '../context';
 
 /** A batch with its teams, what it asks the shop to pull and press, and how far its bundle is. */
 export async function getBatch(ctx: ActorContext, input: { code: string }) {
@@ -73,7 +56,7 @@ function summariseSnapshot(snapshot: Snapshot) {
 }
 
 /** How far the bundle of a batch is: for the progress line that a page asks for every moment or so. */
-export async function getBundleState(ctx: ActorContext, input: { code: string }) {
+export async function getBundleState(ctx: ActorContext, input: { code: string }): Promise<BundleProgress> {
   return withLeague(ctx.league.id, async (tx) => {
     const batch = await findVisibleBatch(tx, ctx, input.code);
     const bundle = await findBundle(tx, batch.id);
@@ -86,4 +69,3 @@ export async function getBundleState(ctx: ActorContext, input: { code: string })
     return { state, done, total, doing, failure, bytes };
   });
 }
-export type BundleProgress = Awaited<ReturnType<typeof getBundleState>>;

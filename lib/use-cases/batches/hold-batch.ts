@@ -1,10 +1,10 @@
 import type { z } from 'zod';
 import { insertAuditEvent } from '@/db/queries/audit';
-import { insertBatch, listShops, lockRostersOfTeams, replaceBatchRosters } from '@/db/queries/batches';
+import { insertBatch, replaceBatchRosters } from '@/db/queries/batches';
 import { findSeasonBySlug } from '@/db/queries/season-view';
-import { listTeamViews, type TeamView } from '@/db/queries/team-view';
-import { withLeague, type LeagueTx } from '@/db/tenant';
-import { AppError, notFound } from '@/lib/platform/errors';
+import { withLeague } from '@/db/tenant';
+import { notFound } from '@/lib/platform/errors';
+import { assertShop, pickReadyTeams } from '../batch-guards';
 import { assertCan, type ActorContext } from '../context';
 import type { holdBatchSchema } from './batch-schemas';
 
@@ -40,39 +40,4 @@ export async function holdBatch(
     );
     return { code };
   });
-}
-
-/** Ends the use case unless the shop belongs to this league. */
-export async function assertShop(tx: LeagueTx, shopId: string): Promise<void> {
-  const shops = await listShops(tx);
-  if (!shops.some((shop) => shop.id === shopId)) throw notFound('shop');
-}
-
-/**
- * The asked-for teams with their rosters locked, each signed off or frozen and held by no other batch than `batchId`;
- * otherwise one error that names every team that is not ready and why.
- */
-export async function pickReadyTeams(
-  tx: LeagueTx,
-  seasonId: string,
-  teamIds: readonly string[],
-  batchId: string | null,
-): Promise<TeamView[]> {
-  // Locked before they are read, so that a sign-off taken back at this moment is either seen or has to wait.
-  await lockRostersOfTeams(tx, teamIds);
-  const teams = (await listTeamViews(tx, seasonId, teamIds)).filter((team) => teamIds.includes(team.id));
-  if (teams.length !== new Set(teamIds).size) throw notFound('team');
-  const problems = teams.flatMap((team) => {
-    if (team.batch !== null && team.batch.id !== batchId)
-      return [`${team.name} is already in batch ${team.batch.code}`];
-    if (team.roster.state !== 'signed off' && team.roster.state !== 'frozen')
-      return [`${team.name} is ${team.roster.state}, not signed off`];
-    return [];
-  });
-  if (problems.length > 0)
-    throw new AppError(
-      'conflict',
-      `${problems.join('; ')}. Take ${problems.length === 1 ? 'it' : 'them'} out and try again.`,
-    );
-  return teams;
 }

@@ -3,8 +3,8 @@ import { findBundle, listBundleParts } from '@/db/queries/bundles';
 import { readStoredFile } from '@/db/queries/stored-files';
 import { withLeague } from '@/db/tenant';
 import { AppError, notFound } from '@/lib/platform/errors';
+import { findVisibleBatch } from '../batch-guards';
 import type { ActorContext } from '../context';
-import { findVisibleBatch } from './get-batch';
 
 /** A file ready to be streamed; `read` gives the bytes from `start` to `end`, both included. */
 export type OpenFile = {

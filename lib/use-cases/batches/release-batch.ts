@@ -13,8 +13,8 @@ import { checkRoster } from '@/lib/domain/rules/check-roster';
 import { getEnv } from '@/lib/platform/env';
 import { AppError } from '@/lib/platform/errors';
 import { sha256, sha256Bytes } from '@/lib/platform/ids';
+import { lockHeldBatch } from '../batch-guards';
 import { assertCan, type ActorContext } from '../context';
-import { lockHeldBatch } from './change-batch';
 
 /**
  * Releases a held batch: freezes its rosters, keeps everything the shop needs as one unchangeable snapshot, queues

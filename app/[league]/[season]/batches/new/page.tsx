@@ -1,0 +1,47 @@
+import type { Metadata } from 'next';
+import { PageHeader } from '@/components/ui/page-header';
+import { BackLink } from '@/components/ui/text-link';
+import { getBatchOptions } from '@/lib/use-cases/batches/list-batches';
+import { paths } from '@/lib/web/paths';
+import { requireLeague } from '@/lib/web/session';
+import { BatchForm } from '../_components/batch-form';
+import { holdBatchAction } from '../actions';
+
+export const metadata: Metadata = { title: 'Make a batch' };
+
+type Props = {
+  params: Promise<{ league: string; season: string }>;
+  searchParams: Promise<{ teams?: string }>;
+};
+
+export default async function NewBatchPage({ params, searchParams }: Props) {
+  const { league, season } = await params;
+  const { ctx } = await requireLeague(league, paths.newBatch(league, season));
+  const options = await getBatchOptions(ctx, { season, batchId: null });
+  const asked = (await searchParams).teams?.split(',');
+  const chosen = options.teams
+    .filter((team) => asked === undefined || asked.includes(team.id))
+    .map((team) => team.id);
+  return (
+    <>
+      <PageHeader
+        title="Make a batch"
+        subtitle="The batch is held until you release it; teams can still be added and taken out."
+        back={<BackLink href={paths.batches(league, season)}>Batches</BackLink>}
+      />
+      <BatchForm
+        league={league}
+        season={season}
+        options={options}
+        start={{
+          teamIds: chosen,
+          shopId: options.shops.length === 1 ? (options.shops[0]?.id ?? '') : '',
+          promisedOn: '',
+        }}
+        held={null}
+        onHold={holdBatchAction}
+        onChange={null}
+      />
+    </>
+  );
+}

@@ -1,0 +1,107 @@
+import { listDivisionViews } from '@/db/queries/division-view';
+import { findSeasonBySlug } from '@/db/queries/season-view';
+import { listPlayersByRoster, listTeamViews, type TeamView } from '@/db/queries/team-view';
+import { withLeague } from '@/db/tenant';
+import { can } from '@/lib/domain/access/permissions';
+import { chooseKits, compareKits, numberContrast } from '@/lib/domain/kit/kit-clash';
+import type { Player } from '@/lib/domain/roster/player';
+import { checkRoster } from '@/lib/domain/rules/check-roster';
+import type { FindingCode } from '@/lib/domain/rules/finding';
+import { countOf } from '@/lib/domain/text/count-of';
+import { notFound } from '@/lib/platform/errors';
+import { assertCan, type ActorContext } from '../context';
+
+/** What concerns an official: numbers. Sizes, spellings and roster limits are the league's own business. */
+const numberCodes: ReadonlySet<FindingCode> = new Set([
+  'number-missing',
+  'number-unreadable',
+  'number-not-allowed',
+  'digit-not-allowed',
+  'too-many-digits',
+  'leading-zero',
+  'zero-and-double-zero',
+  'number-repeated',
+  'number-reserved',
+  'number-needs-role',
+]);
+
+/**
+ * Two teams of one division before a match: who wears which number, every number that is twice or not allowed, and
+ * whether the two kits can be told apart. `home` and `away` are slugs; without both, only the choice is returned.
+ */
+export async function checkMatch(
+  ctx: ActorContext,
+  input: { season: string; division: string | null; home: string | null; away: string | null },
+) {
+  assertCan(ctx.actor, 'match.check');
+  return withLeague(ctx.league.id, async (tx) => {
+    const season = await findSeasonBySlug(tx, input.season);
+    if (!season) throw notFound('season');
+    const divisions = await listDivisionViews(tx, season.id);
+    const teams = await listTeamViews(tx, season.id, null);
+    const division = divisions.find((entry) => entry.slug === input.division) ?? divisions[0];
+    const inDivision = teams.filter((team) => team.divisionId === division?.id);
+    const home = inDivision.find((team) => team.slug === input.home);
+    const away = inDivision.find((team) => team.slug === input.away && team.slug !== input.home);
+    const choice = {
+      season: { slug: season.slug, name: season.name },
+      divisions: divisions.map(({ slug, name }) => ({ slug, name })),
+      division: division?.slug ?? null,
+      teams: inDivision.map(({ slug, name, kits }) => ({ slug, name, kit: kits.home })),
+      home: home?.slug ?? null,
+      away: away?.slug ?? null,
+    };
+    if (!division || !home || !away) return { choice, match: null };
+
+    const players = await listPlayersByRoster(tx, [home.roster.id, away.roster.id]);
+    const side = (team: TeamView) =>
+      makeSide(
+        team,
+        players.get(team.roster.id) ?? [],
+        division,
+        can(ctx.actor, 'match.check', { teamId: team.id }),
+      );
+    return {
+      choice,
+      match: {
+        rules: division.rules ? `${division.ruleSetName}, version ${division.rules.version}` : null,
+        home: side(home),
+        away: side(away),
+        asListed: compareKits(home.kits.home, away.kits.home),
+        kits: chooseKits(home.kits, away.kits),
+      },
+    };
+  });
+}
+export type MatchCheck = Awaited<ReturnType<typeof checkMatch>>;
+
+type Division = Awaited<ReturnType<typeof listDivisionViews>>[number];
+
+function makeSide(team: TeamView, players: readonly Player[], division: Division, mayName: boolean) {
+  const { findings } = division.rules ? checkRoster(division.rules.ruleSet, players, []) : { findings: [] };
+  const troubles = findings.filter((finding) => numberCodes.has(finding.code) && finding.severity !== 'note');
+  return {
+    name: team.name,
+    slug: team.slug,
+    state: team.roster.state,
+    kits: team.kits,
+    legibility: numberContrast(team.kits.home),
+    // An official needs a number and a name to call, nothing else of a child; a manager gets no names of another team.
+    players: players
+      .map((player, row) => ({
+        number: player.number,
+        name: mayName ? player.name : '',
+        trouble: troubles.some((finding) => finding.row === row),
+      }))
+      .sort((a, b) => orderOf(a.number) - orderOf(b.number) || b.number.length - a.number.length),
+    troubles: mayName
+      ? [...new Set(troubles.map((finding) => finding.message))]
+      : countTroubles(troubles.length),
+  };
+}
+export type MatchSide = ReturnType<typeof makeSide>;
+
+const orderOf = (number: string): number => (/^\d+$/.test(number) ? Number(number) : 1000);
+
+const countTroubles = (count: number): string[] =>
+  count === 0 ? [] : [`${countOf(count, 'number')} to check.`];
