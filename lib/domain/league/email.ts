@@ -1,14 +1,32 @@
-/** Every e-mail the product sends, with what it needs to be written. The text itself is in lib/platform/mail. */
-export type OutgoingEmail =
-  | {
-      template: 'invitation';
-      params: { league: string; role: string; invitedBy: string; link: string; expires: string };
-    }
-  | { template: 'password-reset'; params: { link: string; expires: string } }
-  | {
-      template: 'roster-reminder';
-      params: { league: string; team: string; freezes: string; holds: string; link: string };
-    }
-  | { template: 'roster-returned'; params: { league: string; team: string; reason: string; link: string } }
-  | { template: 'roster-signed-off'; params: { league: string; team: string; link: string } }
-  | { template: 'batch-released'; params: { league: string; batch: string; teams: string; link: string } };
+import { z } from 'zod';
+
+const text = z.string();
+const letter = <T extends string, P extends z.ZodRawShape>(template: T, params: P) =>
+  z.object({ template: z.literal(template), params: z.object(params) });
+
+/**
+ * Every e-mail the product sends, with what it needs to be written; the text itself is in lib/platform/mail. All
+ * parameters are words for a person: dates are written out in the league's time zone, lists are joined.
+ */
+export const outgoingEmailSchema = z.discriminatedUnion('template', [
+  /** `teams` is the list of a manager's teams, or empty. */
+  letter('invitation', {
+    league: text,
+    role: text,
+    teams: text,
+    invitedBy: text,
+    link: text,
+    expires: text,
+  }),
+  letter('teams-added', { league: text, teams: text, addedBy: text, link: text }),
+  letter('sign-up', { link: text, expires: text }),
+  /** For somebody who asks for an account and has one: only the owner of the address learns it. */
+  letter('sign-up-known', { signInLink: text, resetLink: text }),
+  letter('password-reset', { link: text, expires: text }),
+  letter('password-changed', { resetLink: text }),
+  letter('roster-reminder', { league: text, team: text, freezes: text, holds: text, link: text }),
+  letter('roster-returned', { league: text, team: text, reason: text, link: text }),
+  letter('roster-signed-off', { league: text, team: text, link: text }),
+  letter('batch-released', { league: text, batch: text, teams: text, link: text }),
+]);
+export type OutgoingEmail = z.infer<typeof outgoingEmailSchema>;
