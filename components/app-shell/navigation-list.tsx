@@ -49,7 +49,7 @@ function Line({
     <Link
       href={item.href}
       aria-current={current ? 'page' : undefined}
-      onClick={onFollow}
+      onClick={() => onFollow?.()}
       className={joinClasses(
         'touch rounded-control flex items-center justify-between gap-3 px-2.5 py-1 no-underline sm:pointer-fine:min-h-8.5',
         current ? 'bg-ink text-on-ink font-[600]' : 'hover:bg-hem/60 font-[450]',
