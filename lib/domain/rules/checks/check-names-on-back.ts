@@ -1,0 +1,123 @@
+import { type RosterLine } from '../../roster/player';
+import { countGraphemes } from '../../text/graphemes';
+import { isLatinText, keepLatin, listNonLatin } from '../../text/latin-letters';
+import { foldText, tidyText } from '../../text/normalise-text';
+import { splitPersonName } from '../../text/person-name';
+import { joinWords, quoteText } from '../../text/sentence';
+import { listInitialForms, listShorterNames } from '../../text/shorter-names';
+import { type Finding, type FindingCode } from '../finding';
+import { type RuleSet } from '../rule-set';
+import { type Check, possessives } from './roster-context';
+
+type NameRules = RuleSet['names'];
+const mostSuggestions = 3;
+
+/** The names on the backs keep to what the rules say: wanted or not, length, letters, and one surname worn twice. */
+export const checkNamesOnBack: Check = ({ rules, players }, findings) => {
+  const { names } = rules.ruleSet;
+  const severity = names.weight;
+  if (severity === 'off') return;
+  const backs = players.map((player) => tidyText(player.nameOnBack));
+  const sharers = names.sharedSurnameNeedsInitial ? groupRows(backs) : new Map<string, number[]>();
+  const fits = (row: number) => (form: string) =>
+    form !== '' && obeysForm(names, form) && isAlone(sharers, row, form);
+  backs.forEach((back, row) => {
+    const add = (code: FindingCode, message: string, forms: string[]): void => {
+      const suggestions = [...new Set(forms)].filter(fits(row)).slice(0, mostSuggestions);
+      findings.push({ code, severity, row, field: 'nameOnBack', message, suggestions } satisfies Finding);
+    };
+    const name = players[row]?.name ?? '';
+    if (back === '') {
+      if (names.onBack === 'wanted') add('name-on-back-missing', missing(name), wornForms(names, name));
+      return;
+    }
+    if (names.onBack === 'not allowed') {
+      add('name-on-back-not-wanted', `No names are worn on the back here. Take ${quoteText(back)} off.`, []);
+      return;
+    }
+    checkForm(names, back, add);
+    const rows = sharers.get(foldText(back)) ?? [];
+    if (rows.length > 1) addShared(players, row, rows, back, names, add);
+  });
+};
+
+type Add = (code: FindingCode, message: string, forms: string[]) => void;
+
+function checkForm(names: NameRules, back: string, add: Add): void {
+  const letters = countGraphemes(back);
+  if (letters > names.mostLetters) {
+    const message = `${quoteText(back)} has ${letters} letters and spaces, and at most ${names.mostLetters} may be worn.`;
+    add('name-too-long', message, listShorterNames(repairLetters(names, back), names.mostLetters));
+  }
+  if (names.letters === 'latin' && !isLatinText(back)) {
+    const wrong = listNonLatin(back)
+      .slice(0, mostSuggestions)
+      .map((mark) => quoteText(mark));
+    const message = `${quoteText(back)} holds ${joinWords(wrong)}. Only Latin letters, spaces, hyphens, apostrophes and full stops may be worn.`;
+    const kept = keepLatin(back);
+    add('name-letters', message, [kept, ...listShorterNames(kept, names.mostLetters)]);
+  }
+}
+
+function addShared(
+  players: readonly RosterLine[],
+  row: number,
+  rows: readonly number[],
+  back: string,
+  names: NameRules,
+  add: Add,
+): void {
+  const { given, surname } = splitPersonName(players[row]?.name ?? '');
+  const others = rows.filter((other) => other !== row);
+  const theirInitials = others.map((other) => initialForms(players[other], back));
+  const own = listInitialForms(back, given, surname);
+  const apart = own.filter((form, i) =>
+    theirInitials.every((forms) => forms[i] === undefined || foldText(forms[i]) !== foldText(form)),
+  );
+  const shorter = apart.slice(0, 1).flatMap((form) => shortenAfterInitial(form, names.mostLetters));
+  const message = `${quoteText(back)} is also on ${possessives(players, others)} back. Each needs an initial.`;
+  add('surname-needs-initial', message, [...apart, ...shorter]);
+}
+
+function initialForms(player: RosterLine | undefined, back: string): string[] {
+  const { given, surname } = splitPersonName(player?.name ?? '');
+  return listInitialForms(back, given, surname);
+}
+
+/** "A BROOKHOLLOW" with its surname cut to fit; the initial stays, because it tells the two apart. */
+function shortenAfterInitial(form: string, most: number): string[] {
+  const [initial = '', ...rest] = form.split(' ');
+  const room = most - countGraphemes(initial) - 1;
+  return listShorterNames(rest.join(' '), room).map((shorter) => `${initial} ${shorter}`);
+}
+
+const missing = (name: string): string =>
+  tidyText(name) === ''
+    ? 'A name on the back is wanted.'
+    : `A name on the back is wanted for ${tidyText(name)}.`;
+
+/** The surname in capitals and shorter forms of it: what most teams print. Common practice, no source. */
+function wornForms(names: NameRules, name: string): string[] {
+  const surname = repairLetters(names, splitPersonName(name).surname).toUpperCase();
+  return [surname, ...listShorterNames(surname, names.mostLetters)];
+}
+
+const repairLetters = (names: NameRules, text: string): string =>
+  names.letters === 'latin' ? keepLatin(text) : text;
+
+const obeysForm = (names: NameRules, form: string): boolean =>
+  countGraphemes(form) <= names.mostLetters &&
+  (names.letters === 'any' || (isLatinText(form) && /\p{L}/u.test(form)));
+
+function groupRows(backs: readonly string[]): Map<string, number[]> {
+  const rows = new Map<string, number[]>();
+  backs.forEach((back, row) => {
+    if (back === '') return;
+    const key = foldText(back);
+    rows.set(key, [...(rows.get(key) ?? []), row]);
+  });
+  return rows;
+}
+
+const isAlone = (sharers: ReadonlyMap<string, number[]>, row: number, form: string): boolean =>
+  (sharers.get(foldText(form)) ?? []).every((other) => other === row);
