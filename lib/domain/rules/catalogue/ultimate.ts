@@ -19,6 +19,6 @@ export const ultimatePresets = [
         says: 'A whole number from 0 to 99, another for each player of a team; one-digit numbers may carry a leading zero.',
       },
     ],
-    open: ['The text in force from 2025 was not read again.'],
+    doubts: ['The text in force from 2025 was not read again.'],
   }),
 ];

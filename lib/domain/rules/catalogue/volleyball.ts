@@ -37,7 +37,7 @@ export const volleyballPresets = [
         says: 'A leading zero and 00 are no longer legal; a plain 0 still is.',
       },
     ],
-    open: [
+    doubts: [
       'The day it takes effect in 2028 is not in the passage known to us; 00 was still legal in 2016-17.',
     ],
   }),

@@ -46,7 +46,8 @@ type Add = (code: FindingCode, message: string, forms: string[]) => void;
 function checkForm(names: NameRules, back: string, add: Add): void {
   const letters = countGraphemes(back);
   if (letters > names.mostLetters) {
-    const message = `${quoteText(back)} has ${letters} letters and spaces, and at most ${names.mostLetters} may be worn.`;
+    const counted = back.includes(' ') ? ' with its spaces' : '';
+    const message = `${quoteText(back)} is ${letters} letters long${counted}, and at most ${names.mostLetters} may be worn.`;
     add('name-too-long', message, listShorterNames(repairLetters(names, back), names.mostLetters));
   }
   if (names.letters === 'latin' && !isLatinText(back)) {

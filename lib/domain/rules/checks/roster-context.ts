@@ -43,18 +43,18 @@ export function readRoster(
 }
 
 /**
- * How a sentence names a player: by surname, by the whole name when another surname on the roster is the same, by row
+ * How a sentence names a player: by surname, by given name and surname when another player has the same surname, by row
  * (counted from 1) when there is no name.
  */
 export function nameInSentence(players: readonly RosterLine[], row: number): string {
   const name = tidyText(players[row]?.name ?? '');
   if (name === '') return `row ${row + 1}`;
-  const surname = splitPersonName(name).surname;
+  const { given, surname } = splitPersonName(name);
   const folded = foldText(surname);
   const shared = players.some(
     (other, at) => at !== row && foldText(splitPersonName(other.name).surname) === folded,
   );
-  return shared ? name : surname;
+  return shared && given !== '' ? `${given} ${surname}` : surname;
 }
 
 /** The other players as owners at the end of a sentence: "Dunmore's", "Dunmore's and row 4's". */
