@@ -34,11 +34,9 @@ export async function takeRatePoint(budget: RateBudget, key: string): Promise<nu
   }
 }
 
-/** How many seconds until the budget for `key` has a point again, without taking one; null when it has. */
-export async function peekRateWait(budget: RateBudget, key: string): Promise<number | null> {
-  const state = await getLimiter(budget).get(key);
-  if (state === null || state.consumedPoints <= budget.points) return null;
-  return Math.max(1, Math.ceil(state.msBeforeNext / 1000));
+/** Gives one point back, as for a try that turned out to be right. */
+export async function returnRatePoint(budget: RateBudget, key: string): Promise<void> {
+  await getLimiter(budget).reward(key, 1);
 }
 
 /** Gives `key` its whole budget back, as after a right password. */

@@ -55,3 +55,11 @@ export const withOpen = <T>(run: (tx: OpenTx) => Promise<T>): Promise<T> =>
   getDatabase()
     .db.transaction()
     .execute((tx) => run(tx as unknown as OpenTx));
+
+/**
+ * Lets a transaction also write the account `userId`: for somebody new, whose account begins in the transaction that
+ * follows a link. Give it only an id that was made a moment ago; nobody else's rows come into sight that way.
+ */
+export async function admitNewPerson(tx: LeagueTx | TokenTx, userId: string): Promise<void> {
+  await sql`select set_config('app.user_id', ${userId}, true)`.execute(tx);
+}

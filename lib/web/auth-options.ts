@@ -5,6 +5,7 @@ import { z } from 'zod';
 import { readClock } from '@/lib/platform/clock';
 import { getEnv } from '@/lib/platform/env';
 import { AppError } from '@/lib/platform/errors';
+import { getLog } from '@/lib/platform/log';
 import { newId } from '@/lib/platform/ids';
 import { signIn } from '@/lib/use-cases/account/sign-in';
 import { paths } from './paths';
@@ -44,9 +45,11 @@ export function getAuthOptions(): NextAuthOptions {
           if (!parsed.success) return null;
           const sent: Record<string, unknown> = request.headers ?? {};
           const address = sent['x-raglan-address'];
+          const sentId = sent['x-request-id'];
+          const requestId = typeof sentId === 'string' ? sentId : newId();
           try {
             const person = await signIn(
-              { now: readClock(), requestId: newId(), newId },
+              { now: readClock(), requestId, newId },
               { ...parsed.data, address: typeof address === 'string' ? address : 'unknown' },
             );
             return (
@@ -60,7 +63,10 @@ export function getAuthOptions(): NextAuthOptions {
           } catch (error) {
             // next-auth hands the message to the sign-in page as it stands; only sentences meant for people pass.
             if (error instanceof AppError) throw new Error(error.message, { cause: error });
-            throw error;
+            getLog().error({ err: error, requestId }, 'sign-in failed');
+            throw new Error(
+              `Signing in failed on our side. Try again; if it stays, quote ${requestId.slice(0, 8)}.`,
+            );
           }
         },
       }),
