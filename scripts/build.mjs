@@ -4,7 +4,7 @@ import fs from 'node:fs';
 import path from 'node:path';
 import { root } from './place.mjs';
 import { lastLines, run } from './run.mjs';
-import { Halt, say, secondsSince } from './say.mjs';
+import { Halt, say, sayFailure, secondsSince } from './say.mjs';
 
 /** What the built application is made of. Tests, migrations and documents are not in it. */
 const sources = [
@@ -58,35 +58,46 @@ export function isBuilt(folder, hash) {
   );
 }
 
-/** @param {string} what @param {string[]} args @param {NodeJS.ProcessEnv} env */
-async function runBuilder(what, args, env) {
-  const { code, output } = await run(process.execPath, args, { cwd: root, env: { ...process.env, ...env } });
-  if (code !== 0) throw new Halt(`Building ${what} failed:\n\n${lastLines(output, 40)}`);
-}
-
 /**
  * Bundles the worker and the mail fake into one file each; packages stay outside.
  * @param {string} folder
  */
-export const buildCommands = (folder) =>
-  runBuilder(
-    'the worker',
-    [
-      'node_modules/esbuild/bin/esbuild',
-      'scripts/worker.ts',
-      'scripts/mail-fake.ts',
-      '--bundle',
-      '--platform=node',
-      '--target=node20',
-      '--format=esm',
-      '--packages=external',
-      '--sourcemap',
-      '--out-extension:.js=.mjs',
-      `--outdir=${folder}`,
-      '--log-level=warning',
-    ],
-    {},
-  );
+export async function buildCommands(folder) {
+  const { build, formatMessages } = await import('esbuild');
+  try {
+    await build({
+      absWorkingDir: root,
+      entryPoints: ['scripts/worker.ts', 'scripts/mail-fake.ts'],
+      bundle: true,
+      platform: 'node',
+      target: 'node20',
+      format: 'esm',
+      packages: 'external',
+      sourcemap: true,
+      outExtension: { '.js': '.mjs' },
+      outdir: folder,
+      logLevel: 'silent',
+    });
+  } catch (error) {
+    const { errors = [] } = /** @type {import('esbuild').BuildFailure} */ (error);
+    const lines = await formatMessages(errors, { kind: 'error', color: false });
+    throw new Halt(`Building the worker failed:\n\n${lines.join('') || error}`);
+  }
+}
+
+/** @param {string} folder */
+async function buildWeb(folder) {
+  const { code, output } = await run(process.execPath, ['node_modules/next/dist/bin/next', 'build'], {
+    cwd: root,
+    env: {
+      ...process.env,
+      NODE_ENV: 'production',
+      NEXT_TELEMETRY_DISABLED: '1',
+      RAGLAN_DIST_DIR: folder,
+    },
+  });
+  if (code !== 0) throw new Halt(`Building the web application failed:\n\n${lastLines(output, 40)}`);
+}
 
 /**
  * Builds into `webFolder` (for Next) and `commandFolder` (for the worker) unless both are up to date.
@@ -101,11 +112,13 @@ export async function buildIfChanged({ webFolder, commandFolder }) {
   // A build that is cut short must not pass for this one.
   fs.rmSync(path.join(root, webFolder, 'raglan-stamp'), { force: true });
   await buildCommands(commandFolder);
-  await runBuilder('the web application', ['node_modules/next/dist/bin/next', 'build'], {
-    NODE_ENV: 'production',
-    NEXT_TELEMETRY_DISABLED: '1',
-    RAGLAN_DIST_DIR: webFolder,
-  });
+  await buildWeb(webFolder);
   fs.writeFileSync(path.join(root, webFolder, 'raglan-stamp'), hash);
   say(`Built in ${secondsSince(start)}.`);
+}
+
+if (process.argv[1] === import.meta.filename) {
+  await buildIfChanged({ webFolder: '.next', commandFolder: 'dist' }).catch((error) => {
+    process.exitCode = sayFailure(error);
+  });
 }

@@ -14,7 +14,9 @@ if (!connectionString) {
 }
 
 const pool = new pg.Pool({ connectionString, max: 2, connectionTimeoutMillis: 10_000 });
-pool.on('error', () => {}); // the query under way reports it
+// The query under way reports what happens to its connection.
+pool.on('error', () => {});
+pool.on('connect', (client) => client.on('error', () => {}));
 const db = new Kysely<unknown>({ dialect: new PostgresDialect({ pool }) });
 const silent = new Logger(() => () => {});
 
