@@ -30,18 +30,6 @@ export function buildNumberRail(
   return listRailLabels(context).map((label) => describeEntry(context, label));
 }
 
-/** The rail in its rows of ten by value, empty rows left out; 00 and other labels with a zero stand before their value. */
-export function groupRailByTens(rail: readonly RailEntry[]): RailEntry[][] {
-  const rows = new Map<number, RailEntry[]>();
-  for (const entry of rail) {
-    const ten = Math.floor(Number(entry.label) / 10);
-    const row = rows.get(ten);
-    if (row === undefined) rows.set(ten, [entry]);
-    else row.push(entry);
-  }
-  return [...rows.values()];
-}
-
 function listRailLabels({ rules, readings }: RosterContext): string[] {
   const highest = Number(rules.labels.at(-1) ?? usualHighest);
   const end = Math.floor(highest / 10) * 10 + 9;

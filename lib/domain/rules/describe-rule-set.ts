@@ -1,6 +1,7 @@
 import { writeDigits } from '../numbers/label-rules';
 import { writeLabels } from '../numbers/parse-labels';
-import { countNoun, joinWords } from '../text/sentence';
+import { countOf } from '../text/count-of';
+import { joinWords } from '../text/sentence';
 import { compileRuleSet, type CompiledRuleSet } from './compile-rule-set';
 import { type RuleSet, type RuleWeight } from './rule-set';
 
@@ -84,9 +85,9 @@ function describeRoster({ roster }: RuleSet): string[] {
   const { least, most, weight } = roster;
   if (weight === 'off') return ['The size of the roster and its roles are not checked.'];
   const size =
-    least === most ? `exactly ${countNoun(most, 'player')}` : `${least} to ${countNoun(most, 'player')}`;
+    least === most ? `exactly ${countOf(most, 'player')}` : `${least} to ${countOf(most, 'player')}`;
   const roles = roster.requiredRoles.map(
-    ({ role, least: needed }) => `At least ${countNoun(needed, 'player')} with the role ${role}.`,
+    ({ role, least: needed }) => `At least ${countOf(needed, 'player')} with the role ${role}.`,
   );
   return [weigh(weight, `A roster holds ${size}.`, ''), ...roles];
 }
@@ -96,7 +97,7 @@ function describeNames({ names }: RuleSet): string[] {
   if (names.onBack === 'not allowed') return [weigh(names.weight, 'No name is worn on the back.', '')];
   const wanted = names.onBack === 'wanted' ? 'Every player needs a name' : 'A player may wear a name';
   const letters = names.letters === 'latin' ? 'Latin letters' : 'letters';
-  const length = `${wanted} on the back, at most ${countNoun(names.mostLetters, letters, letters)}.`;
+  const length = `${wanted} on the back, at most ${countOf(names.mostLetters, letters, letters)}.`;
   const shared = 'Two players with the same name on the back each need an initial.';
   return [weigh(names.weight, length, ''), ...(names.sharedSurnameNeedsInitial ? [shared] : [])];
 }

@@ -15,7 +15,3 @@ export function joinWords(words: readonly string[], conjunction: 'and' | 'or' = 
   if (words.length < 2) return last;
   return `${words.slice(0, -1).join(', ')} ${conjunction} ${last}`;
 }
-
-/** A count with its noun: "1 player", "12 players". The plural is the noun with an s unless it is given. */
-export const countNoun = (count: number, noun: string, plural = `${noun}s`): string =>
-  `${count} ${count === 1 ? noun : plural}`;

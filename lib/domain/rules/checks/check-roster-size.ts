@@ -1,5 +1,5 @@
 import { foldText } from '../../text/normalise-text';
-import { countNoun } from '../../text/sentence';
+import { countOf } from '../../text/count-of';
 import { type Check } from './roster-context';
 
 /** The roster holds neither too few nor too many players, and enough players of each role that the rules ask for. */
@@ -8,7 +8,7 @@ export const checkRosterSize: Check = ({ rules, players }, findings) => {
   if (severity === 'off') return;
   const base = { severity, row: null, field: 'roster', suggestions: [] } as const;
   const size = players.length;
-  const holds = size === 0 ? 'The roster is empty' : `The roster has ${countNoun(size, 'player')}`;
+  const holds = size === 0 ? 'The roster is empty' : `The roster has ${countOf(size, 'player')}`;
   if (size < least) {
     const message = `${holds}, and at least ${least} ${least === 1 ? 'is' : 'are'} needed: add ${least - size}.`;
     findings.push({ ...base, code: 'roster-too-small', message, suggestions: [] });
@@ -22,7 +22,7 @@ export const checkRosterSize: Check = ({ rules, players }, findings) => {
     const found = players.reduce((count, player) => count + (foldText(player.role) === role ? 1 : 0), 0);
     if (found >= required.least) continue;
     const has = found === 0 ? 'no player has it' : `only ${found} ${found === 1 ? 'has' : 'have'} it`;
-    const message = `The role ${required.role} needs at least ${countNoun(required.least, 'player')}, and ${has}.`;
+    const message = `The role ${required.role} needs at least ${countOf(required.least, 'player')}, and ${has}.`;
     findings.push({ ...base, code: 'role-missing', message, suggestions: [] });
   }
 };
