@@ -108,10 +108,6 @@ interface SystemEventsTable {
   data: Json<Record<string, unknown>>;
   request_id: string;
 }
-interface InstallationFactsTable {
-  key: string;
-  value: string;
-}
 interface SeasonsTable {
   league_id: string;
   id: string;
@@ -312,7 +308,6 @@ export interface Database {
   emails: EmailsTable;
   audit_events: AuditEventsTable;
   system_events: SystemEventsTable;
-  installation_facts: InstallationFactsTable;
   seasons: SeasonsTable;
   rule_sets: RuleSetsTable;
   rule_set_versions: RuleSetVersionsTable;

@@ -140,8 +140,6 @@ export async function up(db: Kysely<unknown>): Promise<void> {
       request_id text not null
     )`.execute(db);
 
-  await sql`create table installation_facts (key text primary key, value text not null)`.execute(db);
-
   // A membership that ends also ends the sessions of that person: the next request must sign in again.
   await sql`
     create function end_sessions_with_membership() returns trigger language plpgsql security definer
@@ -214,5 +212,4 @@ export async function up(db: Kysely<unknown>): Promise<void> {
   await sql`grant select, insert on audit_events to raglan_app`.execute(db);
   await sql`grant insert on system_events to raglan_app`.execute(db);
   await sql`grant select, insert, update, delete on rate_limits to raglan_app`.execute(db);
-  await sql`grant select, insert on installation_facts to raglan_app`.execute(db);
 }

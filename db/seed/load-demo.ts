@@ -1,6 +1,7 @@
 import { makeSnapshot } from '@/lib/domain/batch/make-snapshot';
 import { batchStates, type BatchState } from '@/lib/domain/batch/batch-state';
 import { writeCanonicalJson } from '@/lib/domain/batch/canonical-json';
+import { addDays } from '@/lib/domain/dates/day';
 import { toInstant } from '@/lib/domain/dates/zone';
 import { makeSlug } from '@/lib/domain/league/slug';
 import { numberKey } from '@/lib/domain/numbers/number-key';
@@ -16,7 +17,7 @@ import { insertAuditEvent } from '../queries/audit';
 import { insertBatch, replaceBatchRosters, updateBatchState } from '../queries/batches';
 import { insertBundle } from '../queries/bundles';
 import { enqueueJob } from '../queries/jobs';
-import { withLeague, withOpen, withUser, type LeagueTx } from '../tenant';
+import { withLeague, withUser, type LeagueTx } from '../tenant';
 import { makeId } from './invent';
 import { makePlayers } from './make-players';
 import { pellbrookValley } from './pellbrook-valley';
@@ -39,30 +40,25 @@ const stateOfStory: Partial<Record<DemoStory, RosterState>> = {
 type Clock = { today: string; now: Date };
 
 /**
- * Loads the invented leagues once: a second call finds them and changes nothing. `now` sets the dates (the freeze is
- * three days on), everything else is the same every time. Throws when a team would not show what its story says.
+ * Loads the invented leagues, each in one transaction; a league that is there already is left as it is. `now` sets the
+ * dates (the freeze is three days on), everything else is the same every time. Throws when a team would not show what
+ * its story says.
  */
 export async function loadDemo(now: Date): Promise<{ loaded: boolean }> {
-  const fresh = await withOpen(async (tx) => {
-    const mark = await tx
-      .insertInto('installation_facts')
-      .values({ key: 'demo', value: 'loading' })
-      .onConflict((conflict) => conflict.doNothing())
-      .executeTakeFirst();
-    return mark.numInsertedOrUpdatedRows === 1n;
-  });
-  if (!fresh) return { loaded: false };
   const clock = { now, today: now.toISOString().slice(0, 10) };
-  const hash = await hashPassword(demoPassword);
+  let passwordHash: string | undefined;
   for (const league of [ternEstuary, pellbrookValley]) {
-    await loadPeople(league, hash, now);
-    await withLeague(makeId(league.slug), (tx) => loadLeague(tx, league, clock));
+    const id = makeId(league.slug);
+    const known = await withLeague(id, (tx) =>
+      tx.selectFrom('leagues').select('id').where('id', '=', id).executeTakeFirst(),
+    );
+    if (known) continue;
+    passwordHash ??= await hashPassword(demoPassword);
+    await loadPeople(league, passwordHash, now);
+    await withLeague(id, (tx) => loadLeague(tx, league, clock));
   }
-  return { loaded: true };
+  return { loaded: passwordHash !== undefined };
 }
-
-const addDays = (day: string, days: number): string =>
-  new Date(Date.parse(`${day}T00:00:00Z`) + days * 86_400_000).toISOString().slice(0, 10);
 
 /** The first Saturday on or after a day: hand-outs and matches are on Saturdays here. */
 const nextSaturday = (day: string): string =>

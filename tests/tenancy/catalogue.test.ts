@@ -165,7 +165,6 @@ describe('tables that belong to no league', () => {
     const open = tables.filter((table) => !withLeagueId.has(table.name)).map((table) => table.name);
     expect(open.filter((name) => !name.startsWith('kysely_'))).toEqual([
       'emails',
-      'installation_facts',
       'leagues',
       'password_resets',
       'rate_limits',
