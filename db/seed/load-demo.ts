@@ -442,7 +442,7 @@ async function loadBatches(tx: LeagueTx, league: DemoLeague, setting: BatchSetti
     );
     if (entries.length === 0) continue;
     const id = makeId(league.slug, 'batch', plan.story);
-    const start = new Date(setting.clock.now.getTime() - plan.daysAgo * 86_400_000);
+    const start = toInstant(`${addDays(setting.clock.today, -plan.daysAgo)}T09:12`, league.timeZone).instant;
     const promisedOn = addDays(setting.clock.today, 24 - plan.daysAgo);
     const code = await insertBatch(tx, {
       id,

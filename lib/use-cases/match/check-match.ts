@@ -6,8 +6,10 @@ import { can } from '@/lib/domain/access/permissions';
 import { chooseKits, compareKits, numberContrast } from '@/lib/domain/kit/kit-clash';
 import type { Player } from '@/lib/domain/roster/player';
 import { checkRoster } from '@/lib/domain/rules/check-roster';
-import type { FindingCode } from '@/lib/domain/rules/finding';
+import type { Finding, FindingCode } from '@/lib/domain/rules/finding';
 import { countOf } from '@/lib/domain/text/count-of';
+import { splitPersonName } from '@/lib/domain/text/person-name';
+import { joinWords } from '@/lib/domain/text/sentence';
 import { notFound } from '@/lib/platform/errors';
 import { assertCan, type ActorContext } from '../context';
 
@@ -90,7 +92,7 @@ function makeSide(team: TeamView, players: readonly Player[], division: Division
     players: players
       .map((player, row) => ({
         number: player.number,
-        name: mayName ? player.name : '',
+        name: mayName ? callName(player) : '',
         trouble: troubles.some((finding) => finding.row === row),
       }))
       .sort((a, b) => orderOf(a.number) - orderOf(b.number) || b.number.length - a.number.length),
@@ -105,3 +107,24 @@ const orderOf = (number: string): number => (/^\d+$/.test(number) ? Number(numbe
 
 const countTroubles = (count: number): string[] =>
   count === 0 ? [] : [`${countOf(count, 'number')} to check.`];
+
+/** What an official would call: the surname, or the whole name where there is only one word. */
+const callName = (player: Player): string => splitPersonName(player.name).surname || player.name || 'no name';
+
+/** One sentence for each number worn twice, naming all who wear it, and one for each other trouble, naming the player. */
+function sayTroubles(troubles: readonly Finding[], players: readonly Player[]): string[] {
+  const wearers = new Map<string, string[]>();
+  const others: string[] = [];
+  for (const { code, row, message } of troubles) {
+    const player = row === null ? undefined : players[row];
+    if (!player) others.push(message);
+    else if (code === 'number-repeated')
+      wearers.set(player.number, [...(wearers.get(player.number) ?? []), callName(player)]);
+    else others.push(`${callName(player)}: ${message}`);
+  }
+  const repeated = [...wearers].map(
+    ([number, names]) =>
+      `${number} is on ${names.length} shirts: ${joinWords(names)}. ${names.length === 2 ? 'One' : 'All but one'} must change before play.`,
+  );
+  return [...repeated, ...others];
+}

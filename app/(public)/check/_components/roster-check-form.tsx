@@ -178,6 +178,8 @@ export function RosterCheckForm({ presets, checkUrl }: { presets: CheckPreset[];
   );
 }
 
+const capitalise = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
+
 async function checkList(
   url: string,
   preset: CheckPreset,
