@@ -20,7 +20,7 @@ export function Checkbox({
     .filter(Boolean)
     .join(' ');
   return (
-    <div className={joinClasses('grid gap-1', className)}>
+    <div className={joinClasses('grid', className)}>
       <label className="touch relative flex items-center gap-2.5 py-1">
         <input
           {...rest}
@@ -39,11 +39,15 @@ export function Checkbox({
         <span>{label}</span>
       </label>
       {hint !== undefined && (
-        <p id={`${id}-hint`} className="type-small text-dusk pl-7">
+        <p id={`${id}-hint`} className="type-small text-dusk -mt-1 pl-7">
           {hint}
         </p>
       )}
-      {error !== undefined && <FieldError id={`${id}-error`}>{error}</FieldError>}
+      {error !== undefined && (
+        <div className="pl-7">
+          <FieldError id={`${id}-error`}>{error}</FieldError>
+        </div>
+      )}
     </div>
   );
 }

@@ -1,8 +1,8 @@
 /** What text inputs, selects and text areas share, so that they line up in a row. */
 export const controlLook =
-  'touch field-text w-full min-w-0 rounded-control border border-thread bg-card px-3 py-1.5 text-ink ' +
-  'hover:border-dusk aria-invalid:border-stop aria-invalid:bg-stop-wash ' +
-  'disabled:border-hem disabled:bg-linen disabled:text-dusk read-only:bg-linen';
+  'touch field-text w-full min-w-0 rounded-control border border-dusk/70 bg-card px-3 py-1.5 text-ink ' +
+  'hover:border-ink aria-invalid:border-stop aria-invalid:bg-stop-wash ' +
+  'disabled:border-hem disabled:bg-linen disabled:text-dusk [&[readonly]]:bg-linen';
 
 /** The box of a checkbox and, rounded, of a radio button. */
 export const tickBox =

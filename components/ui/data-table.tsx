@@ -229,7 +229,11 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
                       <DataCell key={column.id} column={column} row={row.original} />
                     ))}
                     {props.rowActions !== undefined && (
-                      <td role="cell" className={joinClasses(cellLook, 'py-1! text-right whitespace-nowrap')}>
+                      <td
+                        role="cell"
+                        data-row-actions=""
+                        className={joinClasses(cellLook, 'text-right whitespace-nowrap')}
+                      >
                         {props.rowActions(row.original)}
                       </td>
                     )}
@@ -244,7 +248,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   );
 }
 
-const cellLook = 'border-hem h-12 border-t px-3 py-2 align-middle font-normal';
+const cellLook = 'border-hem h-12 border-t [tr:first-child>&]:border-t-0 px-3 py-2 align-middle font-normal';
 
 function DataCell<Row>({ column, row }: { column: DataColumn<Row>; row: Row }) {
   const look = joinClasses(cellLook, column.end === true && 'sm:text-right');
