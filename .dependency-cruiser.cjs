@@ -15,7 +15,13 @@ module.exports = {
   allowed: [
     may('^lib/domain/', '^lib/domain/', npm('zod|culori|papaparse')),
 
-    may('^lib/platform/', '^lib/platform/', '^lib/domain/', node, npm('zod|pino|nodemailer|@node-rs')),
+    may(
+      '^lib/platform/',
+      '^lib/platform/',
+      '^lib/domain/',
+      node,
+      npm('zod|pino|nodemailer|@node-rs|jszip|read-excel-file'),
+    ),
     may(
       '^lib/documents/',
       '^lib/documents/',

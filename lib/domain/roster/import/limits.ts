@@ -16,13 +16,19 @@ export function refuseSize(bytes: number): Refusal | null {
   );
 }
 
-/** The refusal of `rows` rows of data when that is over the limit, else null; `counted` says whether the count stopped early. */
-export function refuseRowCount(rows: number, counted: 'all' | 'at least' = 'all'): Refusal | null {
+/**
+ * The refusal of `rows` rows of data when that is over the limit, else null. `counted` says what the number is: all
+ * rows of data, all with the headings among them, or the count at which counting stopped.
+ */
+export function refuseRowCount(
+  rows: number,
+  counted: 'all' | 'with headings' | 'at least' = 'all',
+): Refusal | null {
   if (rows <= fileLimits.rows) return null;
-  const amount = rows.toLocaleString('en-GB');
+  const amount = `${counted === 'at least' ? 'at least ' : ''}${rows.toLocaleString('en-GB')}`;
   return refuse(
     'too-many-rows',
-    `This list has ${counted === 'all' ? amount : `at least ${amount}`} rows and the most is 2,000. ` +
+    `This list has ${amount} rows${counted === 'with headings' ? ', headings included,' : ''} and the most is 2,000. ` +
       'Keep the rows of one team, or split the list into parts of at most 2,000 rows.',
   );
 }

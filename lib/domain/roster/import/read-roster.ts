@@ -1,5 +1,6 @@
 import { readNumber } from '../../numbers/label';
-import { countNoun, quoteText } from '../../text/sentence';
+import { countOf } from '../../text/count-of';
+import { quoteText } from '../../text/sentence';
 import { playerLimits, type Garment, type RosterLine } from '../player';
 import { cleanCell, isBlankRow } from './clean-cell';
 import type { ColumnMapping, ColumnTarget } from './column-mapping';
@@ -115,12 +116,26 @@ function keepNumber(typed: string): { number: string; note: string | null } {
   return { number: reading.label, note };
 }
 
-function keepSize(typed: string, garment: Garment | undefined): { size: string; note: string | null } {
+type KeptSize = { size: string; note: string | null };
+
+function keepSize(typed: string, garment: Garment | undefined): KeptSize {
   const code = garment ? findSize(garment, typed) : null;
   if (code === null) return { size: typed, note: null };
   const differs = code.toLowerCase() !== typed.toLowerCase();
   const note = differs ? `${garment?.name ?? 'Size'}: ${quoteText(typed)} was read as ${code}.` : null;
   return { size: code, note };
+}
+
+/** `keepSize` for the garments of one kit, each text of a size worked out once for all rows. */
+function rememberSizes(garments: readonly Garment[]): (garment: string, typed: string) => KeptSize {
+  const byCode = new Map(garments.map((garment) => [garment.code, garment]));
+  const known = new Map<string, KeptSize>();
+  return (code, typed) => {
+    const key = `${code} ${typed}`;
+    const kept = known.get(key) ?? keepSize(typed, byCode.get(code));
+    known.set(key, kept);
+    return kept;
+  };
 }
 
 /** The first entry over its limit as a sentence, or null. Limits count UTF-16 units, as the stored schema does. */
@@ -153,12 +168,13 @@ function readRow(
   columns: readonly ColumnTarget[],
   headings: readonly string[],
   garments: Map<string, Garment>,
+  sizeOf: (garment: string, typed: string) => KeptSize,
 ): Omit<ReadLine, 'rowNumber'> | string {
   const { fields, sizes, extra, notes } = sortCells(row, columns, headings);
   const { number, note } = keepNumber(fields.number ?? '');
   if (note !== null) notes.push(note);
   const keptSizes = [...sizes].map(([code, typed]): [string, string] => {
-    const kept = keepSize(typed, garments.get(code));
+    const kept = sizeOf(code, typed);
     if (kept.note !== null) notes.push(kept.note);
     return [code, kept.size];
   });
@@ -189,6 +205,7 @@ export function readRoster(
   const { headings, notes } = listHeadings(rows, headerRow);
   const header = headerRow === null ? [] : (rows[headerRow] ?? []);
   const byCode = new Map(garments.map((garment) => [garment.code, garment]));
+  const sizeOf = rememberSizes(garments);
   const lines: ReadLine[] = [];
   const refused: RefusedRow[] = [];
   const counts: RowCounts = {
@@ -205,7 +222,7 @@ export function readRoster(
     else if (isBlankRow(row)) counts.blank += 1;
     else if (headerRow !== null && index < headerRow) counts.aboveHeadings += 1;
     else {
-      const read = explainNonEntry(row, header) ?? readRow(row, columns, headings, byCode);
+      const read = explainNonEntry(row, header) ?? readRow(row, columns, headings, byCode, sizeOf);
       if (typeof read === 'string') refused.push({ rowNumber, cells: [...row], reason: read });
       else lines.push({ rowNumber, ...read });
     }
@@ -215,7 +232,7 @@ export function readRoster(
   const leftOut = headings.filter((_, column) => columns[column]?.field === 'leave out');
   if (counts.aboveHeadings > 0) {
     notes.push(
-      `${countNoun(counts.aboveHeadings, 'line')} above the headings ${counts.aboveHeadings === 1 ? 'was' : 'were'} taken for a title.`,
+      `${countOf(counts.aboveHeadings, 'line')} above the headings ${counts.aboveHeadings === 1 ? 'was' : 'were'} taken for a title.`,
     );
   }
   if (!columns.some(({ field }) => field === 'number')) notes.push('No column was matched with the number.');

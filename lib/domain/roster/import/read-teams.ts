@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { foldText } from '../../text/normalise-text';
-import { countNoun, joinWords, quoteText } from '../../text/sentence';
+import { countOf } from '../../text/count-of';
+import { joinWords, quoteText } from '../../text/sentence';
 import { cleanCell, isBlankRow } from './clean-cell';
 import { listHeadings } from './find-headings';
 import { explainNonEntry, type RefusedRow, type RowCounts } from './read-roster';
@@ -135,7 +136,7 @@ export function readTeams(
   counts.refused = refused.length;
   if (counts.aboveHeadings > 0) {
     notes.push(
-      `${countNoun(counts.aboveHeadings, 'line')} above the headings ${counts.aboveHeadings === 1 ? 'was' : 'were'} taken for a title.`,
+      `${countOf(counts.aboveHeadings, 'line')} above the headings ${counts.aboveHeadings === 1 ? 'was' : 'were'} taken for a title.`,
     );
   }
   return reading;
