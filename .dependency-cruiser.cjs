@@ -27,7 +27,7 @@ module.exports = {
       '^lib/documents/',
       '^lib/domain/',
       node,
-      npm(`pdf-lib|@pdf-lib|subset-font|bwip-js|client-zip|jszip|papaparse|culori|${fonts}`),
+      npm(`pdf-lib|@pdf-lib|subset-font|bwip-js|client-zip|jszip|papaparse|culori|zod|${fonts}`),
     ),
 
     may('^migrations/', npm('kysely')),
@@ -80,7 +80,9 @@ module.exports = {
       '^lib/use-cases/',
       '^lib/domain/',
       '^lib/platform/',
-      npm(`react|react-dom|next|next-auth|get-nonce|@tanstack|radix-ui|zod|server-only|tailwindcss|${fonts}`),
+      npm(
+        `react|react-dom|next|next-auth|get-nonce|@tanstack|radix-ui|read-excel-file|zod|server-only|tailwindcss|${fonts}`,
+      ),
     ),
     may('^(proxy|instrumentation)\\.ts$', '^lib/web/', '^lib/platform/', npm('next|next-auth')),
 

@@ -85,8 +85,16 @@ export async function buildCommands(folder) {
   }
 }
 
-/** @param {string} folder */
+/**
+ * Runs Next's build. For a folder other than its own it would write that folder's name into tsconfig.json and
+ * next-env.d.ts; both are put back, so that a test run leaves the working tree as it was.
+ * @param {string} folder
+ */
 async function buildWeb(folder) {
+  const kept = ['tsconfig.json', 'next-env.d.ts']
+    .map((name) => path.join(root, name))
+    .filter((file) => folder !== '.next' && fs.existsSync(file))
+    .map((file) => ({ file, text: fs.readFileSync(file) }));
   const { code, output } = await run(process.execPath, ['node_modules/next/dist/bin/next', 'build'], {
     cwd: root,
     env: {
@@ -94,8 +102,10 @@ async function buildWeb(folder) {
       NODE_ENV: 'production',
       NEXT_TELEMETRY_DISABLED: '1',
       RAGLAN_DIST_DIR: folder,
+      NO_COLOR: '1',
     },
   });
+  for (const { file, text } of kept) fs.writeFileSync(file, text);
   if (code !== 0) throw new Halt(`Building the web application failed:\n\n${lastLines(output, 40)}`);
 }
 

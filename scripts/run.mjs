@@ -18,13 +18,16 @@ export function endRunning() {
  * Runs a program, waits for its end and answers what it printed; never throws for a failing program.
  * @param {string} program
  * @param {string[]} args
- * @param {import('node:child_process').SpawnOptions & { input?: string }} [options]
+ * @param {Omit<import('node:child_process').SpawnOptions, 'env'> & { input?: string, env?: Record<string, string | undefined> }} [options]
  * @returns {Promise<Outcome>}
  */
 export function run(program, args, options = {}) {
   const { input, ...rest } = options;
   return new Promise((resolve) => {
-    const child = spawn(program, args, { stdio: ['pipe', 'pipe', 'pipe'], ...rest });
+    const child = spawn(program, args, {
+      stdio: ['pipe', 'pipe', 'pipe'],
+      .../** @type {import('node:child_process').SpawnOptions} */ (rest),
+    });
     running.add(child);
     let stdout = '';
     let stderr = '';

@@ -13,7 +13,10 @@ const handle = app.getRequestHandler();
 await app.prepare();
 const upgrade = app.getUpgradeHandler();
 
-/** The address nearest to the outermost proxy we trust; without proxies, the socket's own. */
+/**
+ * The address nearest to the outermost proxy we trust; without proxies, the socket's own.
+ * @param {import('node:http').IncomingMessage} request
+ */
 function findAddress(request) {
   const socket = request.socket.remoteAddress ?? 'unknown';
   if (trustedProxies === 0) return socket;
@@ -32,7 +35,7 @@ const server = createServer((request, response) => {
 server.on('upgrade', (request, socket, head) => upgrade(request, socket, head));
 server.on('error', (error) => {
   const says =
-    error.code === 'EADDRINUSE'
+    /** @type {NodeJS.ErrnoException} */ (error).code === 'EADDRINUSE'
       ? `Port ${port} is taken. Stop what uses it, or start with PORT=${port + 1}.`
       : error.message;
   console.error(says);
