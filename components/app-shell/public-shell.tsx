@@ -45,7 +45,7 @@ export function PublicShell({
       <main
         id="content"
         tabIndex={-1}
-        className="mx-auto w-full max-w-300 min-w-0 grow px-4 py-6 outline-none sm:px-6 sm:py-8"
+        className="mx-auto w-full max-w-300 min-w-0 grow px-4 py-6 outline-none sm:px-6 sm:py-6"
       >
         {children}
       </main>

@@ -9,7 +9,7 @@ import { RailLegend, railLook } from './rail-legend';
 /**
  * Every permitted label at a glance, ten to a line (five on a phone). Arrow keys move, Enter picks. Props: `labels` from
  * buildNumberRail, `onPick(label)` for free and kept-back ones, `onVisit(rows, label)` for those that are worn (shows who
- * wears it), `chosen` is the number of the player being edited, `label` names the group.
+ * wears it), `chosen` is the number of the player being edited, `label` names the group, `hint` stands under it until a number is looked at.
  */
 export function NumberRail({
   labels,
@@ -17,12 +17,14 @@ export function NumberRail({
   onVisit,
   chosen,
   label: groupLabel = 'Numbers',
+  hint = 'Point at a number to read who wears it or why not.',
 }: {
   labels: readonly RailEntry[];
   onPick?: ((label: string) => void) | undefined;
   onVisit?: ((rows: readonly number[], label: string) => void) | undefined;
   chosen?: string | undefined;
   label?: string | undefined;
+  hint?: string | undefined;
 }) {
   const names = useMemo(() => labels.map((one) => one.label), [labels]);
   const places = useMemo(() => layOutRail(names), [names]);
@@ -84,7 +86,7 @@ export function NumberRail({
       </div>
       <RailLegend />
       <p aria-live="polite" className="type-small mt-2 min-h-10">
-        {told?.reason}
+        {told?.reason ?? <span className="text-dusk">{hint}</span>}
       </p>
     </div>
   );

@@ -18,6 +18,7 @@ import { foldForSearch, holdsEveryWord } from './fold-for-search';
 import { EmptyState } from './empty-state';
 import { joinClasses } from './join-classes';
 import { SearchInput } from './search-input';
+import { Select } from './select';
 import { Skeleton } from './skeleton';
 import { useOverflow } from './use-overflow';
 import { useWindowRows } from './use-window-rows';
@@ -145,15 +146,37 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     }
   };
 
-  const toolbar = (props.toolbar !== undefined || props.searchLabel !== undefined) && (
-    <div className="flex flex-wrap items-center justify-between gap-3 px-4 py-3 print:hidden">
-      <div className="min-w-0">{props.toolbar}</div>
+  const sortable = columns.filter((column) => column.sortValue !== undefined);
+  const sorted = sorting[0];
+  const bare = props.toolbar === undefined && props.searchLabel === undefined;
+  const toolbar = (!bare || sortable.length > 0) && (
+    <div
+      className={joinClasses(
+        'flex flex-wrap items-center justify-between gap-3 px-4 py-3 print:hidden',
+        bare && 'sm:hidden',
+      )}
+    >
+      {props.toolbar !== undefined && <div className="min-w-0">{props.toolbar}</div>}
       {props.searchLabel !== undefined && (
         <SearchInput
           label={props.searchLabel}
           value={search}
           onChange={(event) => setSearch(event.target.value)}
           className="sm:ml-auto"
+        />
+      )}
+      {sortable.length > 0 && (
+        // The headings that sort are out of sight where rows are cards.
+        <Select
+          aria-label="Sort by"
+          className="w-full sm:hidden"
+          placeholder="In the usual order"
+          value={sorted === undefined ? '' : `${sorted.id} ${sorted.desc ? 'down' : 'up'}`}
+          onChange={(event) => setSorting(readSortChoice(event.target.value))}
+          options={sortable.flatMap((column) => [
+            { value: `${column.id} up`, label: `${column.header}, rising` },
+            { value: `${column.id} down`, label: `${column.header}, falling` },
+          ])}
         />
       )}
     </div>
@@ -185,7 +208,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
             onSort={setSorting}
             hasActions={props.rowActions !== undefined}
             sticky={!overflows}
-            topless={toolbar === false}
+            topless={bare}
           />
           <tbody ref={body} role="rowgroup" onKeyDown={walk}>
             {loading &&
@@ -285,6 +308,12 @@ function Spacer({ height, span }: { height: number; span: number }) {
       <td colSpan={span} style={{ height, padding: 0 }} />
     </tr>
   );
+}
+
+/** The sorting that a value of the phone's sort list stands for: the column's id, then up or down. */
+function readSortChoice(value: string): SortingState {
+  const at = value.lastIndexOf(' ');
+  return at === -1 ? [] : [{ id: value.slice(0, at), desc: value.endsWith(' down') }];
 }
 
 function readSearchText<Row>(columns: readonly DataColumn<Row>[], row: Row): string {
