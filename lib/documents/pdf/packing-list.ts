@@ -11,7 +11,7 @@ import { describeLeague, describeShop, drawCaution, drawFacts, drawHead, drawNex
 
 /** In our own words: the usual care for pages with children's names. */
 const privacyNote =
-  'Holds children’s names. Keep this list with the cartons: don’t post it, pin it up or pass it on, and shred it when the season’s kit is handed out.';
+  'Holds children’s names. Keep it with the cartons: don’t post it or pin it up, and shred it once the kit is handed out.';
 
 /** One kind of piece that every player of the team gets: a garment in one kit. */
 type PieceColumn = { garment: Garment; kind: KitKind; kit: Kit };
@@ -93,7 +93,7 @@ function listFacts(team: SnapshotTeam, pieces: readonly Piece[]) {
     { label: team.players.length === 1 ? 'Bag' : 'Bags', value: String(team.players.length) },
     { label: pieces.length === 1 ? 'Piece' : 'Pieces', value: String(pieces.length) },
     { label: 'Pieces without a size', value: String(without), ...(without > 0 && { colour: care }) },
-    { label: 'Carton', value: '      of' },
+    { label: 'Carton', blank: true } as const,
   ];
 }
 
@@ -169,6 +169,7 @@ function drawTableHead(sheet: Sheet, columns: readonly PieceColumn[], at: Column
 
 type Row = {
   player: SnapshotPlayer;
+  number: TextBlock;
   name: TextBlock;
   back: TextBlock;
   cells: { size: string; text: TextBlock }[][];
@@ -189,6 +190,14 @@ function setRow(
     width: at.playerWidth,
     mostLines: 2,
   });
+  const hasNumber = player.number.trim() !== '';
+  const number = fitBlock(type, hasNumber ? 'figure' : 'text', hasNumber ? player.number : 'none', {
+    size: hasNumber ? 15 : 8,
+    smallest: 8,
+    width: 14,
+    mostLines: 1,
+    leading: 1.1,
+  });
   const back = fitBlock(type, 'code', player.nameOnBack, {
     size: 9,
     smallest: 7,
@@ -208,9 +217,11 @@ function setRow(
   });
   const lines = chunk(cells, at.perLine);
   const lineHeights = lines.map((line) => Math.max(6, ...line.map((cell) => blockHeight(cell.text) + 1.4)));
-  const names = Math.max(blockHeight(name), at.backWidth > 0 ? blockHeight(back) : 0) + 2.4;
+  const names =
+    Math.max(blockHeight(name), blockHeight(number), at.backWidth > 0 ? blockHeight(back) : 0) + 2.4;
   return {
     player,
+    number,
     name,
     back,
     cells: lines,
@@ -224,9 +235,8 @@ function drawRow(sheet: Sheet, row: Row, at: Columns): void {
   const middle = y + row.height / 2;
   const centred = (block: TextBlock) => middle - blockHeight(block) / 2;
   canvas.rect(at.tick + 0.4, middle - 1.9, 3.8, 3.8, { stroke: tickBox });
-  const number = row.player.number.trim();
-  const size = fitSize(canvas.type, 'figure', number, 15, 14);
-  canvas.text(at.number, middle + 1.85, number, { style: 'figure', size, align: 'right' });
+  const numberColour = row.player.number.trim() === '' ? care : ink;
+  canvas.block(at.number, centred(row.number), row.number, { align: 'right', colour: numberColour });
   canvas.block(at.player, centred(row.name), row.name);
   if (at.backWidth > 0) canvas.block(at.back, centred(row.back), row.back);
   let top = middle - sum(row.lineHeights) / 2;

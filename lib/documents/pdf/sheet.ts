@@ -1,10 +1,12 @@
 import type { BatchSnapshot } from '@/lib/domain/batch/batch-snapshot';
-import { blockHeight, fitBlock, fitSize, measureText } from '../text/fit-text';
-import { writeDay, writeMoment } from '../text/write-date';
+import { blockHeight, fitBlock, fitBox, fitSize, measureText } from '../text/fit-text';
+import { formatDay, formatInstant } from '@/lib/domain/dates/format';
+import { isTimeZone } from '@/lib/domain/dates/zone';
 import type { Canvas } from './canvas';
 import { drawYokeTile, tileHeight } from './draw-yoke-tile';
 import { care, damson, dusk, hairline, ink, linen, margin, seam, sheets } from './house-style';
 import { PdfFile, type PdfHead } from './pdf-file';
+import { writeCodePoints } from '../text/list-drawing-notes';
 import type { TypeCase } from '../text/type-case';
 
 type Batch = BatchSnapshot['batch'];
@@ -72,44 +74,53 @@ export class Sheet {
   private drawFoot(canvas: Canvas, page: number, pages: number): void {
     const { batch, name } = this.shape;
     const y = canvas.height - margin.foot - footHeight;
-    drawMissingNote(canvas, { x: this.left, y: y - noteHeight + 1, width: this.width });
+    drawMissingNote(canvas, { x: this.left, y: y - noteHeight, width: this.width, height: noteHeight });
     canvas.line(this.left, y, this.right, y, seam);
     drawYokeTile(canvas, { x: this.left, y: y + 2.6, width: 5 }, markColours);
     const count = `page ${page} of ${pages}`;
     const base = y + 5.9;
     const right = canvas.text(this.right, base, count, { style: 'strong', size: 8, align: 'right' });
-    const nameWidth = (this.width - right) * 0.4;
-    const nameSize = fitSize(canvas.type, 'text', name, 8, nameWidth);
-    const paint = { style: 'text', size: nameSize, colour: dusk, align: 'right' } as const;
-    const shown = canvas.text(this.right - right - 3, base, name, paint);
-    const released = `Batch ${batch.code}, released ${writeMoment(batch.releasedAt, batch.timeZone)}`;
-    const room = this.width - right - shown - 7 - 8;
+    const released = `Batch ${batch.code}, released ${writeRelease(batch)}`;
+    const room = (this.width - right - 7 - 8) / 2;
     const size = fitSize(canvas.type, 'text', released, 8, room);
     canvas.text(this.left + 7, base, released, { style: 'text', size, colour: dusk });
+    const block = fitBlock(canvas.type, 'text', name, { size: 8, smallest: 6, width: room, mostLines: 1 });
+    const top = base - 1 - blockHeight(block) / 2;
+    canvas.block(this.right - right - 3, top, block, { colour: dusk, align: 'right' });
   }
 }
+
+// Any year but the reference year is written out: these sheets are read long after.
+const noYear = -1;
+
+const writeRelease = ({ releasedAt, timeZone }: Batch): string =>
+  formatInstant(new Date(releasedAt), isTimeZone(timeZone) ? timeZone : 'UTC', noYear);
 
 /** The mark of the product: a garment in ink with damson sleeves. */
 const markColours = { body: ink, sleeves: damson, number: ink, outline: null };
 
 /**
- * When letters of this page could not be drawn, a sentence that says which and where their true spelling stands. One
- * line, made smaller until it fits.
+ * When letters of this page could not be drawn, a sentence that says so and where their true spelling stands, on a
+ * sheet also which letters. Made to fit `width` by `height` mm.
  */
-export function drawMissingNote(canvas: Canvas, at: { x: number; y: number; width: number }): void {
+export function drawMissingNote(
+  canvas: Canvas,
+  at: { x: number; y: number; width: number; height: number; brief?: boolean },
+): void {
   const letters = [...new Set(canvas.missing)];
   if (letters.length === 0) return;
   const codes = letters.slice(0, 6).map(writeCodePoints).join(', ');
   const more = letters.length > 6 ? ` and ${letters.length - 6} more` : '';
-  const text = `A crossed box stands for a letter our fonts can’t draw (${codes}${more}). The exact spelling is in data/pieces.csv.`;
-  const size = fitSize(canvas.type, 'text', text, 7.5, at.width);
-  canvas.text(at.x, at.y + 3.5, text, { style: 'text', size, colour: care });
+  const which = at.brief ? '' : ` (${codes}${more})`;
+  const text = `A crossed box stands for a letter our fonts can’t draw${which}. The true spelling is in data/pieces.csv.`;
+  const block = fitBox(canvas.type, 'text', text, {
+    size: 7.5,
+    width: at.width,
+    mostLines: 2,
+    height: at.height,
+  });
+  canvas.block(at.x, at.y, block, { colour: care });
 }
-
-const writeCodePoints = (letter: string): string =>
-  [...letter]
-    .map((c) => `U+${(c.codePointAt(0) ?? 0).toString(16).toUpperCase().padStart(4, '0')}`)
-    .join(' ');
 
 type HeadShape = {
   kind: string;
@@ -130,15 +141,18 @@ export function drawHead(canvas: Canvas, batch: Batch, head: HeadShape): number 
     x += tile + 2;
   }
   if (head.kits.length > 0) x += 3;
-  const codeWidth = 42;
-  const codeSize = fitSize(type, 'figure', batch.code, 28, codeWidth);
+  const codeSize = fitSize(type, 'figure', batch.code, 28, 42);
+  const codeWidth = Math.max(
+    measureText(type, 'figure', batch.code, codeSize),
+    measureText(type, 'text', head.kind, 8.5),
+  );
   canvas.text(right, margin.top + 3, head.kind, { style: 'text', size: 8.5, colour: dusk, align: 'right' });
   canvas.text(right, margin.top + 12.6, batch.code, { style: 'figure', size: codeSize, align: 'right' });
-  const width = right - x - codeWidth - 4;
+  const width = right - x - codeWidth - 6;
   const title = fitBlock(type, 'strong', head.title, { size: 21, smallest: 12, width, mostLines: 1 });
   let y = margin.top - 1 + canvas.block(x, margin.top - 1, title) + 0.6;
   for (const line of head.lines.filter(Boolean)) {
-    const block = fitBlock(type, 'text', line, { size: 9.5, smallest: 7.5, width, mostLines: 1 });
+    const block = fitBlock(type, 'text', line, { size: 9.5, smallest: 8, width, mostLines: 2 });
     y += canvas.block(x, y, block, { colour: dusk });
   }
   return Math.max(y, margin.top + (head.kits.length > 0 ? tileHeight(tile) : 14)) + 4;
@@ -156,12 +170,11 @@ export function drawNextHead(canvas: Canvas, batch: Batch, title: string): numbe
   return Math.max(margin.top + canvas.block(margin.side, margin.top, block), base) + 3;
 }
 
-/** Facts side by side, each a figure under its words, between hairlines. Answers where the strip ends. */
-export function drawFacts(
-  canvas: Canvas,
-  y: number,
-  facts: readonly { label: string; value: string; colour?: string }[],
-): number {
+/** A figure under its words; `blank` leaves "__ of __" to be filled in with a pen. */
+export type Fact = { label: string; value: string; colour?: string } | { label: string; blank: true };
+
+/** Facts side by side between hairlines. Answers where the strip ends. */
+export function drawFacts(canvas: Canvas, y: number, facts: readonly Fact[]): number {
   const left = margin.side;
   const width = canvas.width - 2 * margin.side;
   const cell = width / facts.length;
@@ -172,9 +185,16 @@ export function drawFacts(
     if (at > 0) canvas.line(x, y, x, y + height, hairline);
     const label = fitSize(canvas.type, 'text', fact.label, 8, cell - 6);
     canvas.text(x + 3.2, y + 4.8, fact.label, { style: 'text', size: label, colour: dusk });
+    const base = y + 12;
+    if ('blank' in fact) {
+      const line = { colour: ink, width: 0.25 };
+      canvas.line(x + 3.2, base, x + 12, base, line);
+      canvas.text(x + 15, base, 'of', { style: 'text', size: 9.5, align: 'centre' });
+      canvas.line(x + 18, base, x + 27, base, line);
+      return;
+    }
     const size = fitSize(canvas.type, 'figure', fact.value, 19, cell - 6);
-    const colour = fact.colour ?? ink;
-    canvas.text(x + 3.2, y + 12, fact.value, { style: 'figure', size, colour });
+    canvas.text(x + 3.2, base, fact.value, { style: 'figure', size, colour: fact.colour ?? ink });
   });
   return y + height + 5;
 }
@@ -214,12 +234,4 @@ export const describeLeague = (batch: Batch): string => `${batch.league}, ${batc
 
 /** "For Quay Street Press Room, promised for Friday 2 October 2027". */
 export const describeShop = (batch: Batch): string =>
-  `For ${batch.shop}, ${batch.promisedOn === null ? 'no day promised' : `promised for ${writeDay(batch.promisedOn)}`}`;
-
-/** The width in mm that a set of labels needs at a size, the widest counting. */
-export const widestOf = (
-  type: TypeCase,
-  style: Parameters<typeof measureText>[1],
-  texts: string[],
-  size: number,
-): number => Math.max(0, ...texts.map((text) => measureText(type, style, text, size)));
+  `For ${batch.shop}, ${batch.promisedOn === null ? 'no day promised' : `promised for ${formatDay(batch.promisedOn, noYear)}`}`;

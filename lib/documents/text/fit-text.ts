@@ -110,3 +110,7 @@ export function fitBox(
 
 /** The height of a block in mm, from the top of its first line to the foot of its last; 0 without lines. */
 export const blockHeight = (block: TextBlock): number => block.lines.length * block.leading;
+
+/** The width in mm of the widest line of a block. */
+export const blockWidth = (block: TextBlock): number =>
+  Math.max(0, ...block.lines.map((line) => line.width)) * block.size * mmPerPoint;

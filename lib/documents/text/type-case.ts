@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import fontkit, { type Font } from '@pdf-lib/fontkit';
 import subsetFont from 'subset-font';
-import { openFace, styleFaces, typeStyles, type FaceName, type TypeStyle } from './font-faces';
+import { covers, openFace, styleFaces, typeStyles, type FaceName, type TypeStyle } from './font-faces';
 import { splitRuns } from './split-runs';
 
 /** A font cut down to the letters of one batch: the file to embed, and the same file opened for measuring. */
@@ -77,6 +77,12 @@ function listNeededCharacters(texts: readonly string[]): Map<FaceName, Set<strin
     if (first) add(first, houseCharacters);
     for (const run of [...unique, ...alone].flatMap((text) => splitRuns(style, text))) {
       if (run.face !== null) add(run.face, run.text);
+    }
+  }
+  // A comma or a figure that a document puts behind a name is drawn in the face of that name.
+  for (const face of needed.keys()) {
+    for (const character of houseCharacters) {
+      if (!/\p{L}/u.test(character) && covers(face, character)) add(face, character);
     }
   }
   return needed;

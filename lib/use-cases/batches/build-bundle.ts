@@ -10,7 +10,9 @@ import {
 } from '@/db/queries/bundles';
 import { insertStoredFile, readStoredFile } from '@/db/queries/stored-files';
 import { withLeague } from '@/db/tenant';
-import { buildManifest, listBundleParts, zipBundle } from '@/lib/documents/bundle';
+import { listBundleParts } from '@/lib/documents/bundle';
+import { buildManifest } from '@/lib/documents/bundle-manifest';
+import { zipBundle } from '@/lib/documents/bundle-zip';
 import type { RequestContext } from '../context';
 
 /** How often progress is written at most, in parts of a document: a row for every label would be all the work. */
