@@ -15,6 +15,8 @@ export function proxy(request: NextRequest): NextResponse {
   const nonce = btoa(crypto.randomUUID());
   const policy = writePolicy(nonce);
   headers.set('x-nonce', nonce);
+  // A layout isn't told which page it frames, and must send a stranger to sign in and back to that page.
+  headers.set('x-raglan-path', request.nextUrl.pathname + request.nextUrl.search);
   // Next takes the nonce for its own script and style tags from the policy on the request, not from x-nonce.
   headers.set('content-security-policy', policy);
   const response = NextResponse.next({ request: { headers } });
