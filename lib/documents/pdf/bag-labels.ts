@@ -3,7 +3,7 @@ import { listPlayerPieces, noSize, type Piece } from '@/lib/domain/packing/list-
 import { blockHeight, blockWidth, fitBox, fitSize, mmPerPoint } from '../text/fit-text';
 import type { TypeCase } from '../text/type-case';
 import type { Canvas } from './canvas';
-import { drawQrCode } from './draw-qr-code';
+import { drawQrCode, quietModules } from './draw-qr-code';
 import { drawYokeTile } from './draw-yoke-tile';
 import { care, dusk, ink, labelSize, seam, tickBox } from './house-style';
 import { PdfFile } from './pdf-file';
@@ -16,6 +16,7 @@ const inner = labelSize.width - 2 * edge;
 /** The code is 30 mm wide: 21 modules of 1.4 mm, 17 dots each at 300 dpi, with white all round. */
 const codeWidth = 30;
 const codeLeft = right - codeWidth;
+const quiet = (codeWidth / 21) * quietModules;
 const piecesPerLabel = 16;
 
 /** Saira's capitals and digits are 0.688 em high. */
@@ -107,7 +108,7 @@ function drawTeam(canvas: Canvas, { team }: Label): void {
 
 /** The number as tall as the code beside it, narrower only when it has more than two characters. */
 function drawNumber(canvas: Canvas, player: SnapshotPlayer): void {
-  const width = codeLeft - edge - 7;
+  const width = codeLeft - quiet - 1 - edge;
   const number = player.number.trim();
   if (number === '') {
     canvas.text(edge, 50, 'no number', { style: 'strong', size: 17, colour: care });
@@ -121,7 +122,11 @@ function drawNumber(canvas: Canvas, player: SnapshotPlayer): void {
 function drawCode(canvas: Canvas, player: SnapshotPlayer): void {
   drawQrCode(canvas, { x: codeLeft, y: 32, width: codeWidth }, player.bagCode);
   const size = fitSize(canvas.type, 'code', player.bagCode, 15, codeWidth);
-  canvas.text(codeLeft + codeWidth / 2, 71, player.bagCode, { style: 'code', size, align: 'centre' });
+  canvas.text(codeLeft + codeWidth / 2, 62 + quiet + 4, player.bagCode, {
+    style: 'code',
+    size,
+    align: 'centre',
+  });
 }
 
 /** The name in up to four lines and under it the name as pressed. Answers where the next part starts. */

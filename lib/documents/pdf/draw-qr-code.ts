@@ -26,11 +26,11 @@ export function encodeQrCode(text: string): boolean[][] {
 /** Draws a QR symbol as rectangles, `width` mm wide without its quiet zone, which the caller keeps white. */
 export function drawQrCode(canvas: Canvas, at: { x: number; y: number; width: number }, text: string): void {
   const rows = encodeQrCode(text);
-  const module = at.width / rows.length;
+  const side = at.width / rows.length;
   canvas.modules(
     rows.flatMap((row, y) =>
       listDarkRuns(row).map(
-        ([from, length]) => [at.x + from * module, at.y + y * module, length * module, module] as const,
+        ([from, length]) => [at.x + from * side, at.y + y * side, length * side, side] as const,
       ),
     ),
     ink,
