@@ -1,0 +1,114 @@
+import { z } from 'zod';
+import { cleanCell } from './import/clean-cell';
+import { playerLimits, rosterLineSchema, type Player } from './player';
+
+/** A player while a roster is edited: the order of the list is the order of the roster, so there is no position. */
+export type RosterEntry = Omit<Player, 'position'>;
+
+/** One cell of a player: an own field, or the size of one garment by its code. */
+export const cellFieldSchema = z.union([
+  z.enum(['name', 'nameOnBack', 'number', 'role']),
+  z.templateLiteral(['size:', z.string().regex(/^[a-z][a-z0-9-]{0,38}$/)]),
+]);
+export type CellField = z.infer<typeof cellFieldSchema>;
+
+const cellWords = {
+  name: { limit: playerLimits.name, says: 'name' },
+  nameOnBack: { limit: playerLimits.nameOnBack, says: 'name on back' },
+  number: { limit: playerLimits.number, says: 'number' },
+  role: { limit: playerLimits.role, says: 'role' },
+} as const;
+
+/** The most characters (UTF-16 units, as stored) a cell may hold. */
+export const cellLimit = (field: CellField): number =>
+  isSizeField(field) ? playerLimits.size : cellWords[field].limit;
+
+/** What a cell is called in a sentence: "name on back", "size". */
+export const nameOfCell = (field: CellField): string => (isSizeField(field) ? 'size' : cellWords[field].says);
+
+type SizeField = Exclude<CellField, keyof typeof cellWords>;
+
+/** Whether a cell holds the size of a garment. */
+export const isSizeField = (field: CellField): field is SizeField => field.startsWith('size:');
+
+/** The garment whose size a cell holds. */
+export const garmentOf = (field: SizeField): string => field.slice('size:'.length);
+
+/** Text as a cell keeps it: tidied, without characters that no database or printer takes. Idempotent. */
+export const cleanCellText = (text: string): string => cleanCell(text).text;
+
+const entrySchema = rosterLineSchema.extend({
+  id: z.uuid(),
+  extra: z.record(z.string().max(120), z.string().max(playerLimits.note)),
+});
+const placeSchema = z.uuid().nullable();
+
+/**
+ * One thing a person did to a roster. `from` is what the cell held when it was done, `was` the player as they were;
+ * `after` is the player above (null at the top of the list). Ids of added players are made by whoever adds them, so
+ * that an edit sent twice is done once.
+ */
+export const rosterEditSchema = z.discriminatedUnion('kind', [
+  z
+    .object({
+      kind: z.literal('set'),
+      playerId: z.uuid(),
+      field: cellFieldSchema,
+      from: z.string().max(200),
+      to: z.string().max(2000).transform(cleanCellText),
+    })
+    .superRefine(({ field, to }, context) => {
+      const problem = refuseCell(field, to);
+      if (problem !== null) context.addIssue({ code: 'custom', path: ['to'], message: problem });
+    }),
+  z.object({ kind: z.literal('add'), player: entrySchema.transform(cleanEntry), after: placeSchema }),
+  z.object({ kind: z.literal('remove'), was: entrySchema, after: placeSchema }),
+  z.object({ kind: z.literal('move'), playerId: z.uuid(), after: placeSchema, from: placeSchema }),
+]);
+export type RosterEdit = z.infer<typeof rosterEditSchema>;
+
+/** Why a text is too long for a cell, as a sentence, or null. Nothing is ever cut. */
+export function refuseCell(field: CellField, text: string): string | null {
+  const most = cellLimit(field);
+  return text.length <= most
+    ? null
+    : `A ${nameOfCell(field)} has at most ${most} characters; this one has ${text.length}.`;
+}
+
+function cleanEntry(entry: RosterEntry): RosterEntry {
+  const clean = (record: Record<string, string>) =>
+    Object.fromEntries(
+      Object.entries(record)
+        .map(([key, value]) => [key, cleanCellText(value)] as const)
+        .filter(([, value]) => value !== ''),
+    );
+  return {
+    ...entry,
+    name: cleanCellText(entry.name),
+    nameOnBack: cleanCellText(entry.nameOnBack),
+    number: cleanCellText(entry.number),
+    role: cleanCellText(entry.role),
+    sizes: clean(entry.sizes),
+    extra: clean(entry.extra),
+  };
+}
+
+/** The player an edit is about. */
+export function playerOfEdit(edit: RosterEdit): string {
+  if (edit.kind === 'add') return edit.player.id;
+  return edit.kind === 'remove' ? edit.was.id : edit.playerId;
+}
+
+/** The edit that takes this one back, to be applied after it. */
+export function invertEdit(edit: RosterEdit): RosterEdit {
+  switch (edit.kind) {
+    case 'set':
+      return { ...edit, from: edit.to, to: edit.from };
+    case 'add':
+      return { kind: 'remove', was: edit.player, after: edit.after };
+    case 'remove':
+      return { kind: 'add', player: edit.was, after: edit.after };
+    case 'move':
+      return { ...edit, after: edit.from, from: edit.after };
+  }
+}
