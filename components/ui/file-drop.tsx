@@ -19,7 +19,7 @@ export function judgeFile(
   }
   if (file.size === 0) return `${file.name} is empty. Check that it was saved, then add it again.`;
   if (file.size > maxBytes) {
-    return `${file.name} is ${formatBytes(file.size)}; the most we take is ${formatBytes(maxBytes)}. Remove pictures and other sheets, then add it again.`;
+    return `${file.name} is larger than ${formatBytes(maxBytes)}, the most we take. Remove pictures and other sheets, then add it again.`;
   }
   return null;
 }

@@ -5,6 +5,8 @@ import { useEffect, useRef, useState, useSyncExternalStore, type RefObject } fro
 
 /** From this many rows on, only those in sight are drawn. */
 const windowedFrom = 101;
+/** Height of a row of one line, in px, until it has been measured. */
+const usualHeight = 49;
 /** What the server draws of a long list, before the window's height is known. */
 const firstRows = 40;
 
@@ -22,7 +24,9 @@ export function useWindowRows(count: number, body: RefObject<HTMLElement | null>
   const virtual = useWindowVirtualizer({
     count,
     enabled: on && mounted,
-    estimateSize: () => 49,
+    estimateSize: () => usualHeight,
+    // A table that is not on screen measures nothing, and then every row would seem to fit.
+    measureElement: (element) => element.getBoundingClientRect().height || usualHeight,
     overscan: 12,
     scrollMargin: margin,
   });
