@@ -9,8 +9,14 @@ export type AuditEvent =
   | { type: 'league created'; subjectId: string; data: { name: string } }
   | { type: 'league changed'; subjectId: string; data: { changes: Difference } }
   | { type: 'person invited'; subjectId: string; data: { role: string; email: string } }
+  | { type: 'invitation sent again'; subjectId: string; data: { role: string; email: string } }
   | { type: 'invitation withdrawn'; subjectId: string; data: { role: string; email: string } }
   | { type: 'invitation accepted'; subjectId: string; data: { role: string } }
+  | {
+      type: 'manager teams changed';
+      subjectId: string;
+      data: { person: string; added: string[]; removed: string[] };
+    }
   | { type: 'membership ended'; subjectId: string; data: { role: string; person: string } }
   | { type: 'shop added'; subjectId: string; data: { name: string } }
   | { type: 'season opened'; subjectId: string; data: { name: string } }
