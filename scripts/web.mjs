@@ -27,7 +27,19 @@ function findAddress(request) {
   return hops.at(-trustedProxies) ?? socket;
 }
 
+/**
+ * Next drops the Content-Length of every answer it did not write itself. A download says its size in `x-body-bytes`,
+ * which becomes the real header here, so that browsers can show how far they are.
+ * @param {import('node:http').ServerResponse} response
+ */
+function letDownloadsSayTheirSize(response) {
+  const append = response.appendHeader.bind(response);
+  response.appendHeader = (name, value) =>
+    name.toLowerCase() === 'x-body-bytes' ? response.setHeader('content-length', value) : append(name, value);
+}
+
 const server = createServer((request, response) => {
+  letDownloadsSayTheirSize(response);
   request.headers['x-raglan-address'] = findAddress(request);
   delete request.headers['x-request-id'];
   handle(request, response);

@@ -35,7 +35,8 @@ export function streamFile(request: { headers: Headers }, file: OpenFile): Respo
     'content-type': file.mediaType,
     'content-disposition': `attachment; filename="${file.name.replace(/[^\w.-]/g, '_')}"; filename*=UTF-8''${encodeURIComponent(file.name)}`,
     // Names of children: never in a shared cache, and never kept by the browser without asking again.
-    'cache-control': 'private, no-cache',
+    // And never compressed on the way, since ranges count the bytes of the file itself.
+    'cache-control': 'private, no-cache, no-transform',
   });
   if (request.headers.get('if-none-match') === etag) return new Response(null, { status: 304, headers });
   const range = readRange(request.headers, file.bytes, etag);
@@ -44,7 +45,8 @@ export function streamFile(request: { headers: Headers }, file: OpenFile): Respo
     return new Response(null, { status: 416, headers });
   }
   const { start, end } = range ?? { start: 0, end: file.bytes - 1 };
-  headers.set('content-length', String(end - start + 1));
+  // scripts/web.mjs turns this into Content-Length, which Next would drop.
+  headers.set('x-body-bytes', String(end - start + 1));
   if (range) headers.set('content-range', `bytes ${start}-${end}/${file.bytes}`);
   const source = file.read({ start, end });
   const body = new ReadableStream<Uint8Array>({
