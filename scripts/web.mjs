@@ -33,9 +33,9 @@ function findAddress(request) {
  * @param {import('node:http').ServerResponse} response
  */
 function letDownloadsSayTheirSize(response) {
-  const append = response.appendHeader.bind(response);
-  response.appendHeader = (name, value) =>
-    name.toLowerCase() === 'x-body-bytes' ? response.setHeader('content-length', value) : append(name, value);
+  const set = response.setHeader.bind(response);
+  response.setHeader = (name, value) =>
+    name.toLowerCase() === 'x-body-bytes' ? set('content-length', String(value)) : set(name, value);
 }
 
 const server = createServer((request, response) => {
