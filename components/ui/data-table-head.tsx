@@ -58,7 +58,7 @@ export function DataTableHead<Row>({
           );
         })}
         {hasActions && (
-          <th role="columnheader" scope="col" className={look}>
+          <th role="columnheader" scope="col" className={joinClasses(look, 'print:hidden')}>
             <span className="sr-only">Actions</span>
           </th>
         )}

@@ -255,7 +255,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
                       <td
                         role="cell"
                         data-row-actions=""
-                        className={joinClasses(cellLook, 'text-right whitespace-nowrap')}
+                        className={joinClasses(cellLook, 'text-right whitespace-nowrap print:hidden')}
                       >
                         {props.rowActions(row.original)}
                       </td>

@@ -29,7 +29,7 @@ export function Switch({
         checked={checked}
         onCheckedChange={onChange}
         disabled={disabled}
-        className="true-colour border-dusk bg-linen data-[state=checked]:border-ink data-[state=checked]:bg-ink relative h-6 w-10.5 shrink-0 rounded-full border disabled:opacity-50"
+        className="true-colour border-dusk bg-linen data-[state=checked]:border-ink data-[state=checked]:bg-ink relative h-6 w-10.5 before:absolute before:-inset-2.5 shrink-0 rounded-full border disabled:opacity-50"
       >
         <Radix.Thumb className="bg-dusk data-[state=checked]:bg-on-ink block size-4 translate-x-1 rounded-full transition-transform data-[state=checked]:translate-x-5" />
       </Radix.Root>
