@@ -1,5 +1,5 @@
 import type { SortingState } from '@tanstack/react-table';
-import type { DataColumn } from './data-table';
+import type { DataColumn } from './data-column';
 import { joinClasses } from './join-classes';
 
 /**

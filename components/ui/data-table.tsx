@@ -13,6 +13,7 @@ import {
 } from '@tanstack/react-table';
 import { useMemo, useRef, useState, type KeyboardEvent, type ReactNode } from 'react';
 import { Button } from './button';
+import type { DataColumn } from './data-column';
 import { DataTableHead } from './data-table-head';
 import { foldForSearch, holdsEveryWord } from './fold-for-search';
 import { EmptyState } from './empty-state';
@@ -22,23 +23,6 @@ import { Select } from './select';
 import { Skeleton } from './skeleton';
 import { useOverflow } from './use-overflow';
 import { useWindowRows } from './use-window-rows';
-
-/**
- * One column. `cell` draws it; `sortValue` makes it sortable (null sorts last either way); `searchText` lets the search
- * look into it; `end` sets figures to the right; `rowHead` names the row and heads its card on a phone; `width` is a
- * class such as w-40 for lists over 100 rows, whose columns keep still.
- */
-export type DataColumn<Row> = {
-  id: string;
-  header: string;
-  cell: (row: Row) => ReactNode;
-  sortValue?: (row: Row) => string | number | null;
-  searchText?: (row: Row) => string;
-  end?: boolean;
-  rowHead?: boolean;
-  headerHidden?: boolean;
-  width?: string;
-};
 
 export type DataTableProps<Row> = {
   /** What the table lists; read aloud. */

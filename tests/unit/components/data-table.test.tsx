@@ -1,7 +1,8 @@
 import { cleanup, render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, describe, expect, it, vi } from 'vitest';
-import { DataTable, type DataColumn, type DataTableProps } from '@/components/ui/data-table';
+import type { DataColumn } from '@/components/ui/data-column';
+import { DataTable, type DataTableProps } from '@/components/ui/data-table';
 
 afterEach(cleanup);
 
