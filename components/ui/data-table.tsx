@@ -24,6 +24,8 @@ import { Skeleton } from './skeleton';
 import { useOverflow } from './use-overflow';
 import { useWindowRows } from './use-window-rows';
 
+export type { DataColumn };
+
 export type DataTableProps<Row> = {
   /** What the table lists; read aloud. */
   caption: string;
