@@ -11,4 +11,5 @@ export const links = {
   reset: (token: string) => link(`/reset/${token}`),
   join: (token: string) => link(`/join/${token}`),
   league: (slug: string) => link(`/${slug}`),
+  roster: (league: string, season: string, team: string) => link(`/${league}/${season}/rosters/${team}`),
 };

@@ -5,10 +5,12 @@ import { playerLimits, rosterLineSchema, type Player } from './player';
 /** A player while a roster is edited: the order of the list is the order of the roster, so there is no position. */
 export type RosterEntry = Omit<Player, 'position'>;
 
+const garmentCodeSchema = z.string().regex(/^[a-z][a-z0-9-]{0,38}$/);
+
 /** One cell of a player: an own field, or the size of one garment by its code. */
 export const cellFieldSchema = z.union([
   z.enum(['name', 'nameOnBack', 'number', 'role']),
-  z.templateLiteral(['size:', z.string().regex(/^[a-z][a-z0-9-]{0,38}$/)]),
+  z.templateLiteral(['size:', garmentCodeSchema]),
 ]);
 export type CellField = z.infer<typeof cellFieldSchema>;
 
@@ -37,10 +39,42 @@ export const garmentOf = (field: SizeField): string => field.slice('size:'.lengt
 /** Text as a cell keeps it: tidied, without characters that no database or printer takes. Idempotent. */
 export const cleanCellText = (text: string): string => cleanCell(text).text;
 
-const entrySchema = rosterLineSchema.extend({
-  id: z.uuid(),
-  extra: z.record(z.string().max(120), z.string().max(playerLimits.note)),
-});
+const cleanRecord = (record: Record<string, string>): Record<string, string> =>
+  Object.fromEntries(
+    Object.entries(record)
+      .map(([key, value]) => [cleanCellText(key), cleanCellText(value)] as const)
+      .filter(([key, value]) => key !== '' && value !== ''),
+  );
+
+/** The cells of a player as they come from outside: within their limits, cleaned, sizes by garment code. */
+export const incomingLineSchema = rosterLineSchema
+  .extend({ sizes: z.record(garmentCodeSchema, z.string().max(playerLimits.size)) })
+  .transform((line) => ({
+    name: cleanCellText(line.name),
+    nameOnBack: cleanCellText(line.nameOnBack),
+    number: cleanCellText(line.number),
+    role: cleanCellText(line.role),
+    sizes: cleanRecord(line.sizes),
+  }));
+
+/** What a file held beside the cells of a player, by heading, as it comes from outside. */
+export const incomingExtraSchema = z
+  .record(z.string().max(120), z.string().max(playerLimits.note))
+  .refine((extra) => Object.keys(extra).length <= 100, 'At most 100 further columns are kept.')
+  .transform(cleanRecord);
+
+const entrySchema = z
+  .object({ id: z.uuid(), extra: incomingExtraSchema })
+  .and(incomingLineSchema)
+  .transform(({ id, name, nameOnBack, number, role, sizes, extra }): RosterEntry => ({
+    id,
+    name,
+    nameOnBack,
+    number,
+    role,
+    sizes,
+    extra,
+  }));
 const placeSchema = z.uuid().nullable();
 
 /**
@@ -61,7 +95,7 @@ export const rosterEditSchema = z.discriminatedUnion('kind', [
       const problem = refuseCell(field, to);
       if (problem !== null) context.addIssue({ code: 'custom', path: ['to'], message: problem });
     }),
-  z.object({ kind: z.literal('add'), player: entrySchema.transform(cleanEntry), after: placeSchema }),
+  z.object({ kind: z.literal('add'), player: entrySchema, after: placeSchema }),
   z.object({ kind: z.literal('remove'), was: entrySchema, after: placeSchema }),
   z.object({ kind: z.literal('move'), playerId: z.uuid(), after: placeSchema, from: placeSchema }),
 ]);
@@ -73,24 +107,6 @@ export function refuseCell(field: CellField, text: string): string | null {
   return text.length <= most
     ? null
     : `A ${nameOfCell(field)} has at most ${most} characters; this one has ${text.length}.`;
-}
-
-function cleanEntry(entry: RosterEntry): RosterEntry {
-  const clean = (record: Record<string, string>) =>
-    Object.fromEntries(
-      Object.entries(record)
-        .map(([key, value]) => [key, cleanCellText(value)] as const)
-        .filter(([, value]) => value !== ''),
-    );
-  return {
-    ...entry,
-    name: cleanCellText(entry.name),
-    nameOnBack: cleanCellText(entry.nameOnBack),
-    number: cleanCellText(entry.number),
-    role: cleanCellText(entry.role),
-    sizes: clean(entry.sizes),
-    extra: clean(entry.extra),
-  };
 }
 
 /** The player an edit is about. */

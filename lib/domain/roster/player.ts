@@ -3,6 +3,9 @@ import { z } from 'zod';
 /** Longest entries kept. Longer input is reported, never cut. */
 export const playerLimits = { name: 120, nameOnBack: 60, number: 20, role: 40, size: 20, note: 500 } as const;
 
+/** The most players one roster holds; rule sets ask for fewer. */
+export const mostPlayersPerRoster = 200;
+
 /**
  * One line of a roster as a person entered it. `number` and sizes are text exactly as typed (a number is a label),
  * empty when not given; `sizes` maps a garment code to a size code.
