@@ -36,7 +36,7 @@ export async function mailInvitation(
       teams: joinWords(invitation.teams.map((team) => team.name)),
       invitedBy: ctx.actor.name,
       link: links.join(invitation.token),
-      expires: formatInstant(invitation.expiresAt, ctx.league.timeZone),
+      expires: `until ${formatInstant(invitation.expiresAt, ctx.league.timeZone)}`,
     },
   });
 }

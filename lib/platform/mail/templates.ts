@@ -46,7 +46,7 @@ function compose(email: OutgoingEmail): Letter {
         blocks: [
           `${invitedBy} invites you to ${league} ${what}. Raglan is where the league keeps its teams, rosters and kit.`,
           { says: 'Accept the invitation', link },
-          `The link works once, until ${expires}. If you do not know ${league}, do nothing: no account is made.`,
+          `The link works once, ${expires}. If you do not know ${league}, do nothing: no account is made.`,
         ],
       };
     }
@@ -67,7 +67,7 @@ function compose(email: OutgoingEmail): Letter {
         blocks: [
           'Somebody, we hope you, asked for a Raglan account with this address.',
           { says: 'Choose a password and open the account', link },
-          `The link works once, until ${expires}. If it was not you, do nothing: no account is made.`,
+          `The link works once, ${expires}. If it was not you, do nothing: no account is made.`,
         ],
       };
     }
@@ -90,7 +90,7 @@ function compose(email: OutgoingEmail): Letter {
         blocks: [
           'Somebody, we hope you, asked to set a new password for the Raglan account of this address.',
           { says: 'Set a new password', link },
-          `The link works once, until ${expires}. If it was not you, do nothing: your password stays as it is.`,
+          `The link works once, ${expires}. If it was not you, do nothing: your password stays as it is.`,
         ],
       };
     }

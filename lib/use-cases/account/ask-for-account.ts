@@ -38,7 +38,7 @@ export async function askForAccount(
       const params = { signInLink: links.signIn(), resetLink: links.askReset() };
       await queueEmail(tx, ctx, input.email, { template: 'sign-up-known', params });
     } else {
-      const params = { link: links.confirmSignUp(token), expires: `${hoursValid} hours after it was sent` };
+      const params = { link: links.confirmSignUp(token), expires: `for ${hoursValid} hours` };
       await queueEmail(tx, ctx, input.email, { template: 'sign-up', params });
     }
   });

@@ -28,7 +28,7 @@ export async function askForReset(
   const token = newToken();
   try {
     await withUser(userId, async (tx) => {
-      const params = { link: links.reset(token), expires: 'one hour after it was sent' };
+      const params = { link: links.reset(token), expires: 'for an hour' };
       await queueEmail(tx, ctx, input.email, { template: 'password-reset', params });
       await insertSystemEvent(tx, { ...ctx, userId }, { type: 'password reset asked for', data: {} });
       if (!account) throw new NothingToKeep();

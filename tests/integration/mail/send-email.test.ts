@@ -29,7 +29,7 @@ afterAll(async () => {
 
 const reset: OutgoingEmail = {
   template: 'password-reset',
-  params: { link: 'http://localhost:3000/reset/secret', expires: 'one hour after it was sent' },
+  params: { link: 'http://localhost:3000/reset/secret', expires: 'for an hour' },
 };
 
 async function queue(to: string, email: OutgoingEmail = reset): Promise<string> {

@@ -34,7 +34,12 @@ export function DemoSignIns({
               </span>
               <span className="type-code text-dusk block break-all">{email}</span>
             </span>
-            <Button size="sm" aria-label={`Fill in ${email}`} onClick={() => onChoose({ email, password })}>
+            <Button
+              size="sm"
+              className="shrink-0 whitespace-nowrap"
+              aria-label={`Fill in ${email}`}
+              onClick={() => onChoose({ email, password })}
+            >
               Fill in
             </Button>
           </li>

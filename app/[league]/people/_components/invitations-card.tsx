@@ -89,8 +89,8 @@ export function InvitationsCard({
                   <StatusTag tone="wait">Until {row.until}</StatusTag>
                 )}
               </Td>
-              <Td data-row-actions="" className="text-right">
-                <span className="inline-flex flex-wrap justify-end gap-2">
+              <Td className="text-right">
+                <span className="inline-flex flex-wrap gap-2 max-sm:mt-2 max-sm:w-full max-sm:*:grow sm:justify-end">
                   <Button
                     size="sm"
                     pending={busy === row.id}

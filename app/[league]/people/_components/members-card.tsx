@@ -34,10 +34,10 @@ const columns: DataColumn<Member>[] = [
     header: 'Person',
     rowHead: true,
     cell: (row) => (
-      <>
+      <div className="min-w-0 text-left max-sm:pr-12">
         <span className="block font-[560]">{row.name}</span>
         <span className="type-small text-dusk block break-all">{row.email}</span>
-      </>
+      </div>
     ),
     sortValue: (row) => row.name,
     searchText: (row) => `${row.name} ${row.email}`,

@@ -1,7 +1,8 @@
 import { Card } from '@/components/ui/card';
 import { Icon } from '@/components/ui/icon';
 import { Table, Tbody, Td, Th, Thead, Tr } from '@/components/ui/table';
-import { permissionTable, roles, type Reach } from '@/lib/domain/access/permissions';
+import { permissionTable, roles, type Reach, type Role } from '@/lib/domain/access/permissions';
+import { titleOfRole } from './describe-place';
 
 const says: Record<Reach, string> = {
   league: 'Yes',
@@ -22,24 +23,37 @@ export function RolesCard() {
         <Thead>
           <Th>What</Th>
           {roles.map((role) => (
-            <Th key={role}>{role.charAt(0).toUpperCase() + role.slice(1)}</Th>
+            <Th key={role} className="max-sm:hidden">
+              {titleOfRole(role)}
+            </Th>
           ))}
+          <Th className="sm:hidden">Who</Th>
         </Thead>
         <Tbody>
           {Object.entries(permissionTable).map(([permission, row]) => (
             <Tr key={permission}>
               <Td rowHead>{row.says}</Td>
               {roles.map((role) => (
-                <Td key={role} label={role.charAt(0).toUpperCase() + role.slice(1)}>
+                <Td key={role} className="max-sm:hidden!">
                   <ReachMark reach={row.reach[role]} />
                 </Td>
               ))}
+              <Td className="text-left! sm:hidden">{listHolders(row.reach)}</Td>
             </Tr>
           ))}
         </Tbody>
       </Table>
     </Card>
   );
+}
+
+/** The same in one line, for a phone: "League admin, team manager (own teams)". */
+function listHolders(reach: Record<Role, Reach>): string {
+  const line = roles
+    .filter((role) => reach[role] !== 'none')
+    .map((role) => (reach[role] === 'league' ? role : `${role} (${says[reach[role]].toLowerCase()})`))
+    .join(', ');
+  return titleOfRole(line);
 }
 
 function ReachMark({ reach }: { reach: Reach }) {

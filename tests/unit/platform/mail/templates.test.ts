@@ -18,7 +18,7 @@ const invitation = (league: string): OutgoingEmail => ({
     teams: 'Otters and Herons',
     invitedBy: 'Maren Tidewell',
     link: 'http://localhost:3000/join/abc_-1',
-    expires: 'Tuesday 15 December at 12:00',
+    expires: 'until Tuesday 15 December at 12:00',
   },
 });
 
