@@ -1,4 +1,4 @@
-import { isSameEntry, listCells, readCell, writeCell } from './cells';
+import { isSameEntry, listCells, makeEmptyEntry, readCell, writeCell } from './cells';
 import type { RosterEdit, RosterEntry } from './edit';
 
 /** An edit that could not be applied because somebody else got there first, and what they did. */
@@ -117,21 +117,20 @@ export const playerAbove = (players: readonly RosterEntry[], row: number): strin
   players[row - 1]?.id ?? null;
 
 /**
- * The edits that let a conflict end the way its editor wanted, against the roster as it is now; `lastKnown` is the
- * player as the editor last saw them, for one that has been removed since and now comes back below the player `after`.
- * Empty when nothing is left to do.
+ * The edits that let a conflict end the way its editor wanted. `present` is the player as they stand now; one who was
+ * removed comes back below the player `after`, as `lastKnown` (or with nothing but the cell in question).
  */
 export function insistOn(
-  conflict: EditConflict,
+  { edit }: EditConflict,
+  present: RosterEntry | undefined,
   lastKnown: RosterEntry | undefined,
   after: string | null,
 ): RosterEdit[] {
-  const { edit, theirs } = conflict;
   if (edit.kind === 'set') {
-    if (theirs.is === 'cell') return [{ ...edit, from: theirs.value }];
-    if (lastKnown === undefined) return [];
-    return [{ kind: 'add', player: writeCell(lastKnown, edit.field, edit.to), after }];
+    if (present !== undefined) return [{ ...edit, from: readCell(present, edit.field) }];
+    const player = writeCell(lastKnown ?? makeEmptyEntry(edit.playerId), edit.field, edit.to);
+    return [{ kind: 'add', player, after }];
   }
-  if (edit.kind === 'remove' && theirs.is === 'changed player') return [{ ...edit, was: theirs.player }];
+  if (edit.kind === 'remove' && present !== undefined) return [{ ...edit, was: present }];
   return [];
 }

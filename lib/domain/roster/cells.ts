@@ -29,7 +29,8 @@ export function listDifferentCells(one: RosterLine, other: RosterLine): CellFiel
   return [...fields].filter((field) => readCell(one, field) !== readCell(other, field));
 }
 
-const sameExtra = (one: Record<string, string>, other: Record<string, string>): boolean =>
+/** Whether two players came with the same cells of a file beside them. */
+export const sameExtra = (one: Record<string, string>, other: Record<string, string>): boolean =>
   Object.keys(one).length === Object.keys(other).length &&
   Object.entries(one).every(([key, value]) => Object.hasOwn(other, key) && other[key] === value);
 

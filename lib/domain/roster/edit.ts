@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { readNumber } from '../numbers/label';
 import { cleanCell } from './import/clean-cell';
 import { playerLimits, rosterLineSchema, type Player } from './player';
 
@@ -39,6 +40,17 @@ export const garmentOf = (field: SizeField): string => field.slice('size:'.lengt
 /** Text as a cell keeps it: tidied, without characters that no database or printer takes. Idempotent. */
 export const cleanCellText = (text: string): string => cleanCell(text).text;
 
+/** A number as it is kept: the label as worn ("No. 7" is 7, full-width digits are plain), else the text as typed. */
+export function cleanNumber(text: string): string {
+  const clean = cleanCellText(text);
+  const reading = readNumber(clean);
+  return reading.ok ? reading.label : clean;
+}
+
+/** What somebody typed or pasted into a cell, as it is kept. */
+export const cleanCellValue = (field: CellField, text: string): string =>
+  field === 'number' ? cleanNumber(text) : cleanCellText(text);
+
 const cleanRecord = (record: Record<string, string>): Record<string, string> =>
   Object.fromEntries(
     Object.entries(record)
@@ -52,7 +64,7 @@ export const incomingLineSchema = rosterLineSchema
   .transform((line) => ({
     name: cleanCellText(line.name),
     nameOnBack: cleanCellText(line.nameOnBack),
-    number: cleanCellText(line.number),
+    number: cleanNumber(line.number),
     role: cleanCellText(line.role),
     sizes: cleanRecord(line.sizes),
   }));
@@ -89,8 +101,9 @@ export const rosterEditSchema = z.discriminatedUnion('kind', [
       playerId: z.uuid(),
       field: cellFieldSchema,
       from: z.string().max(200),
-      to: z.string().max(2000).transform(cleanCellText),
+      to: z.string().max(2000),
     })
+    .transform((edit) => ({ ...edit, to: cleanCellValue(edit.field, edit.to) }))
     .superRefine(({ field, to }, context) => {
       const problem = refuseCell(field, to);
       if (problem !== null) context.addIssue({ code: 'custom', path: ['to'], message: problem });
