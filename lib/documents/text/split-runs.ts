@@ -77,13 +77,14 @@ function findLevels(letters: readonly string[]): { text: string; level: number }
   });
 }
 
-/** A mark or a space stays in the face of the letter before it, so that words are shaped in one piece. */
+/** A mark or a space stays in the face of the letter it is read with, so that words are shaped in one piece. */
 function chooseFaces(style: TypeStyle, letters: Letter[]): void {
-  let last: FaceName | null = null;
+  let last: Letter | undefined;
   for (const letter of letters) {
-    const stays: boolean = last !== null && common.test(letter.text) && covers(last, letter.text);
-    letter.face = stays ? last : (styleFaces[style].find((face) => covers(face, letter.text)) ?? null);
-    last = letter.face;
+    const before: FaceName | null = last?.level === letter.level ? last.face : null;
+    const stays: boolean = before !== null && common.test(letter.text) && covers(before, letter.text);
+    letter.face = stays ? before : (styleFaces[style].find((face) => covers(face, letter.text)) ?? null);
+    last = letter;
   }
 }
 
