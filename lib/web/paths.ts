@@ -46,6 +46,9 @@ export const paths = {
     openapi: () => '/api/v1/openapi.json',
     roster: (league: string, rosterId: string) => `/api/v1/leagues/${league}/rosters/${rosterId}`,
     rosterCsv: (league: string, rosterId: string) => `/api/v1/leagues/${league}/rosters/${rosterId}/csv`,
+    rosterFile: (league: string, rosterId: string) =>
+      `/api/v1/leagues/${league}/rosters/${rosterId}/read-file`,
+    historyCsv: (league: string) => `/api/v1/leagues/${league}/history.csv`,
     bundleState: (league: string, batch: string) => `/api/v1/leagues/${league}/batches/${batch}/bundle`,
     bundleZip: (league: string, batch: string) => `/api/v1/leagues/${league}/batches/${batch}/bundle.zip`,
     bundleFile: (league: string, batch: string, path: string) =>
