@@ -1,7 +1,7 @@
 import Papa from 'papaparse';
 import { readCell, makeEmptyEntry, writeCell } from './cells';
 import { cleanCellValue, refuseCell, type RosterEdit, type RosterEntry } from './edit';
-import { countNoun } from '../text/sentence';
+import { countOf } from '../text/count-of';
 import { unguardCell } from './import/formula-guard';
 import { findSize } from './import/match-size';
 import { mostPlayersPerRoster } from './player';
@@ -72,11 +72,10 @@ export function planPaste(given: {
     last = fresh.id;
     count += 1;
   }
-  if (beyond > 0)
-    problems.push(`${countNoun(beyond, 'cell')} lay beyond the last column and found no place.`);
+  if (beyond > 0) problems.push(`${countOf(beyond, 'cell')} lay beyond the last column and found no place.`);
   if (unplaced > 0) {
     problems.push(
-      `${countNoun(unplaced, 'row')} found no place: a roster holds at most ${mostPlayersPerRoster}.`,
+      `${countOf(unplaced, 'row')} found no place: a roster holds at most ${mostPlayersPerRoster}.`,
     );
   }
   return { edits, problems };
