@@ -1,4 +1,3 @@
-import { setImmediate } from 'node:timers/promises';
 import type { BatchSnapshot } from '@/lib/domain/batch/batch-snapshot';
 import { writeTableCsv, writeTableJson } from './machine/data-table';
 import { writeReadMe } from './machine/read-me';
@@ -11,7 +10,7 @@ import { listBatchTexts } from './text/list-batch-texts';
 import { makeTypeCase, type TypeCase } from './text/type-case';
 
 /** Told after every unit of work how many of the part's units are done; it is waited for. */
-export type OnProgress = (done: number, total: number) => void | Promise<void>;
+type OnProgress = (done: number, total: number) => void | Promise<void>;
 
 /** A file of the bundle that can be built by itself; `units` says how much work it is next to the others. */
 export type BundlePart = {
@@ -111,7 +110,7 @@ function finishPart({ make, ...part }: Making): BundlePart {
       let told = 0;
       const bytes = await make(async (done) => {
         told = done;
-        if (done % breathAfter === 0) await setImmediate();
+        if (done % breathAfter === 0) await new Promise((resolve) => setImmediate(resolve));
         await onProgress?.(done, part.units);
       });
       if (told < part.units) await onProgress?.(part.units, part.units);

@@ -28,7 +28,7 @@ export function makeGarment(overrides: Partial<Garment> = {}): Garment {
   };
 }
 
-export const shorts = makeGarment({
+const shorts = makeGarment({
   code: 'shorts',
   name: 'Shorts',
   worn: 'home',
@@ -36,21 +36,21 @@ export const shorts = makeGarment({
   named: false,
 });
 
-export const otterHome: Kit = {
+const otterHome: Kit = {
   name: 'navy',
   body: '#14375e',
   sleeves: '#c9d6e2',
   number: '#ffffff',
   outline: null,
 };
-export const otterAway: Kit = {
+const otterAway: Kit = {
   name: 'white',
   body: '#ffffff',
   sleeves: '#14375e',
   number: '#14375e',
   outline: '#c9d6e2',
 };
-export const heronHome: Kit = {
+const heronHome: Kit = {
   name: 'silver and teal',
   body: '#d9dee3',
   sleeves: '#2f6f73',

@@ -14,7 +14,7 @@ export const quietModules = 4;
  * The rows of a QR symbol, true for a dark module, without the quiet zone. Error correction is fixed at level M (the
  * encoder would raise it when there is room, and the symbol would change with its version).
  */
-export function encodeQrCode(text: string): boolean[][] {
+function encodeQrCode(text: string): boolean[][] {
   const options = { bcid: 'qrcode', text, eclevel: 'M', fixedeclevel: true };
   const [symbol] = symbolSchema.parse(bwipjs.raw(options));
   if (!symbol) throw new Error('The encoder gave no symbol.');

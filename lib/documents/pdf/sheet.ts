@@ -218,7 +218,7 @@ export function drawCaution(canvas: Canvas, y: number, text: string): number {
 }
 
 /** The mark of a caution: a triangle with a bar and a dot, `size` mm high. */
-export function drawTriangle(canvas: Canvas, x: number, y: number, size: number): void {
+function drawTriangle(canvas: Canvas, x: number, y: number, size: number): void {
   const width = size * 1.12;
   canvas.path([['M', x + width / 2, y], ['L', x + width, y + size], ['L', x, y + size], ['Z']], {
     fill: care,

@@ -42,7 +42,7 @@ export function pullDigits(pieces: readonly Piece[]): DigitPull[] {
 }
 
 /** The characters of a label that are applied to a garment: all but white space. */
-export const listLabelCharacters = (label: string): string[] => [...label.replace(/\s/gu, '')];
+const listLabelCharacters = (label: string): string[] => [...label.replace(/\s/gu, '')];
 
 function countDigits(pieces: readonly Piece[]): DigitPull {
   const counts = new Map<string, number>();

@@ -2,7 +2,7 @@ import { noSize, type Piece } from './list-pieces';
 import { orderSizes } from './order-sizes';
 
 /** How many pieces of one size; `code` is `''` for pieces without a size, `known` false for one outside the run. */
-export type SizeCount = { code: string; label: string; count: number; known: boolean };
+type SizeCount = { code: string; label: string; count: number; known: boolean };
 
 /** The pieces of one style in one colour. `sizes` holds the sizes wanted, in the order of the run, "no size" last. */
 export type ColourPull = {
