@@ -1,5 +1,5 @@
 import { type RosterLine } from '../roster/player';
-import { nameInSentence, readRoster, type RosterContext } from '../rules/checks/roster-context';
+import { nameRows, readRoster, type RosterContext } from '../rules/checks/roster-context';
 import { compileRuleSet, refuseLabel, type CompiledRuleSet } from '../rules/compile-rule-set';
 import { type RuleSet } from '../rules/rule-set';
 import { tidyText } from '../text/normalise-text';
@@ -53,8 +53,8 @@ function describeEntry(context: RosterContext, label: string): RailEntry {
   const clash = clashOfZeros(context, key);
   if (clash !== null) return entry(rows.length > 0 ? 'twice' : 'refused', clash);
   if (rows.length > 1 && rules.unique)
-    return entry('twice', `${label} is worn by ${listNames(context, rows)}.`);
-  if (rows.length > 0) return entry('taken', `${label} is worn by ${listNames(context, rows)}.`);
+    return entry('twice', `${label} is worn by ${nameRows(context, rows)}.`);
+  if (rows.length > 0) return entry('taken', `${label} is worn by ${nameRows(context, rows)}.`);
 
   const reservation = rules.reserved.get(key);
   if (reservation === undefined) return entry('free', `${label} is free.`);
@@ -64,14 +64,12 @@ function describeEntry(context: RosterContext, label: string): RailEntry {
 }
 
 /** Where 0 and 00 may not both be worn: the sentence for one of them while the other is worn, or null. */
-function clashOfZeros({ rules, rowsByKey, players }: RosterContext, key: string): string | null {
+function clashOfZeros(context: RosterContext, key: string): string | null {
+  const { rules, rowsByKey } = context;
   if (rules.ruleSet.labels.zeroAndDoubleZero !== 'not both' || (key !== '0' && key !== '00')) return null;
   const other = key === '0' ? '00' : '0';
   const rows = rowsByKey.get(other);
   if (rows === undefined) return null;
-  const names = joinWords(rows.map((row) => nameInSentence(players, row)));
+  const names = nameRows(context, rows);
   return `0 and 00 may not both be on one roster, and ${names} ${rows.length === 1 ? 'wears' : 'wear'} ${other}.`;
 }
-
-const listNames = (context: RosterContext, rows: readonly number[]): string =>
-  joinWords(rows.map((row) => nameInSentence(context.players, row)));

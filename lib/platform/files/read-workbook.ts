@@ -151,9 +151,13 @@ async function readSheets(
 
 const two = (number: number): string => String(number).padStart(2, '0');
 
-/** A date as ISO 8601 text, with the time only when there is one. The reader gives wall-clock time as if it were UTC. */
-function writeDate(date: Date): string {
-  if (Number.isNaN(date.getTime())) return '';
+/**
+ * A date as ISO 8601 text, with the time only when there is one. The reader gives wall-clock time as if it were UTC,
+ * cut from a fraction of a day, so it is rounded to the second.
+ */
+function writeDate(cut: Date): string {
+  if (Number.isNaN(cut.getTime())) return '';
+  const date = new Date(Math.round(cut.getTime() / 1000) * 1000);
   const day = `${date.getUTCFullYear()}-${two(date.getUTCMonth() + 1)}-${two(date.getUTCDate())}`;
   const time = `${two(date.getUTCHours())}:${two(date.getUTCMinutes())}`;
   return time === '00:00' ? day : `${day}T${time}`;

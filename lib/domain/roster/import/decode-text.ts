@@ -38,7 +38,7 @@ const notText = refuse(
 
 const decode = (bytes: Uint8Array, label: string): string | null => {
   try {
-    return new TextDecoder(label, { fatal: true, ignoreBOM: true }).decode(bytes);
+    return mendWindows1252(new TextDecoder(label, { fatal: true, ignoreBOM: true }).decode(bytes), label);
   } catch {
     return null;
   }
@@ -48,7 +48,7 @@ const decode = (bytes: Uint8Array, label: string): string | null => {
 function decodeLoosely(bytes: Uint8Array, label: string): { text: string; note?: string } {
   const whole = decode(bytes, label);
   if (whole !== null) return { text: whole };
-  const text = new TextDecoder(label, { ignoreBOM: true }).decode(bytes);
+  const text = mendWindows1252(new TextDecoder(label, { ignoreBOM: true }).decode(bytes), label);
   const broken = text.split('\uFFFD').length - 1;
   const places = broken === 1 ? '1 place' : `${broken} places`;
   return {
@@ -56,6 +56,18 @@ function decodeLoosely(bytes: Uint8Array, label: string): { text: string; note?:
     note: `${places} could not be read as text and shows as \uFFFD. Look for it and type it again.`,
   };
 }
+
+/** What the bytes 80 to 9F mean in Windows-1252, in order; five of them mean nothing. WHATWG Encoding Standard, index. */
+const highPunctuation = '€\u0081‚ƒ„…†‡ˆ‰Š‹Œ\u008DŽ\u008F\u0090‘’“”•–—˜™š›œ\u009DžŸ';
+
+/**
+ * Some versions of Node.js read Windows-1252 as ISO 8859-1, so that an apostrophe (byte 92) comes out as an invisible
+ * control character; a right reading is left as it is.
+ */
+const mendWindows1252 = (text: string, label: EncodingLabel): string =>
+  label === 'windows-1252'
+    ? text.replace(/[\u0080-\u009F]/g, (control) => highPunctuation[control.charCodeAt(0) - 0x80] ?? control)
+    : text;
 
 /** Control characters that no list holds: C0 apart from tab, line ends, page and vertical feed, and end-of-file 1A. */
 const controls = /[\u0000-\u0008\u000E-\u0019\u001B-\u001F]/g;
@@ -152,7 +164,7 @@ export function decodeText(bytes: Uint8Array): DecodeResult {
   const utf8 = decode(bytes, 'utf-8');
   if (utf8 !== null) return read(utf8, 'UTF-8', true);
   return read(
-    new TextDecoder('windows-1252').decode(bytes),
+    mendWindows1252(new TextDecoder('windows-1252').decode(bytes), 'windows-1252'),
     'Windows-1252',
     false,
     'The file does not say how its letters are stored, so they were read as Windows-1252. If names look wrong, choose another encoding.',

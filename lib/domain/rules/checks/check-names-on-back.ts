@@ -7,13 +7,14 @@ import { joinWords, quoteText } from '../../text/sentence';
 import { listInitialForms, listShorterNames } from '../../text/shorter-names';
 import { type Finding, type FindingCode } from '../finding';
 import { type RuleSet } from '../rule-set';
-import { type Check, possessives } from './roster-context';
+import { type Check, nameRows, type RosterContext } from './roster-context';
 
 type NameRules = RuleSet['names'];
 const mostSuggestions = 3;
 
 /** The names on the backs keep to what the rules say: wanted or not, length, letters, and one surname worn twice. */
-export const checkNamesOnBack: Check = ({ rules, players }, findings) => {
+export const checkNamesOnBack: Check = (context, findings) => {
+  const { rules, players } = context;
   const { names } = rules.ruleSet;
   const severity = names.weight;
   if (severity === 'off') return;
@@ -37,7 +38,7 @@ export const checkNamesOnBack: Check = ({ rules, players }, findings) => {
     }
     checkForm(names, back, add);
     const rows = sharers.get(foldText(back)) ?? [];
-    if (rows.length > 1) addShared(players, row, rows, back, names, add);
+    if (rows.length > 1) addShared(context, row, rows, back, names, add);
   });
 };
 
@@ -61,13 +62,14 @@ function checkForm(names: NameRules, back: string, add: Add): void {
 }
 
 function addShared(
-  players: readonly RosterLine[],
+  context: RosterContext,
   row: number,
   rows: readonly number[],
   back: string,
   names: NameRules,
   add: Add,
 ): void {
+  const { players } = context;
   const { given, surname } = splitPersonName(players[row]?.name ?? '');
   const others = rows.filter((other) => other !== row);
   const theirInitials = others.map((other) => initialForms(players[other], back));
@@ -76,7 +78,7 @@ function addShared(
     theirInitials.every((forms) => forms[i] === undefined || foldText(forms[i]) !== foldText(form)),
   );
   const shorter = apart.slice(0, 1).flatMap((form) => shortenAfterInitial(form, names.mostLetters));
-  const message = `${quoteText(back)} is also on ${possessives(players, others)} back. Each needs an initial.`;
+  const message = `${quoteText(back)} is also on ${nameRows(context, others, "'s")} back. Each needs an initial.`;
   add('surname-needs-initial', message, [...apart, ...shorter]);
 }
 

@@ -1,6 +1,6 @@
 import { tidyText } from '../../text/normalise-text';
 import { refuseLabel } from '../compile-rule-set';
-import { type Check, nameInSentence } from './roster-context';
+import { type Check } from './roster-context';
 import { suggestFreeLabels, suggestParts } from './suggest-labels';
 
 /**
@@ -26,7 +26,7 @@ export const checkNumbers: Check = (context, findings) => {
     if (!reading.ok) {
       const name = tidyText(players[row]?.name ?? '');
       const message =
-        reading.empty && name !== '' ? `${nameInSentence(players, row)} has no number yet.` : reading.reason;
+        reading.empty && name !== '' ? `${context.nameOf(row)} has no number yet.` : reading.reason;
       const code = reading.empty ? 'number-missing' : 'number-unreadable';
       const suggestions = reading.empty
         ? suggestFreeLabels(context, row, null)

@@ -1,4 +1,4 @@
-import { type Check, possessives } from './roster-context';
+import { type Check, nameRows } from './roster-context';
 import { suggestFreeLabels } from './suggest-labels';
 
 /** No two players of a team wear the same number; each of them is told whose number it also is. */
@@ -16,7 +16,7 @@ export const checkUniqueness: Check = (context, findings) => {
         const theirs = context.readings[other];
         return theirs?.ok === true && theirs.label === label;
       });
-      const owners = possessives(context.players, others);
+      const owners = nameRows(context, others, "'s");
       const message = allAlike
         ? `${label} is also ${owners}.`
         : `${label} counts as the same number as ${owners}.`;

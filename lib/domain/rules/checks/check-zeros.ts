@@ -1,5 +1,4 @@
-import { joinWords } from '../../text/sentence';
-import { type Check, nameInSentence } from './roster-context';
+import { type Check, nameRows } from './roster-context';
 import { suggestFreeLabels } from './suggest-labels';
 
 /** Where 0 and 00 may not both be worn, everybody who wears one while another player wears the other is told. */
@@ -10,7 +9,7 @@ export const checkZeros: Check = (context, findings) => {
   const doubleZeros = context.rowsByKey.get('00');
   if (zeros === undefined || doubleZeros === undefined) return;
   const report = (rows: readonly number[], label: string, others: readonly number[], other: string): void => {
-    const names = joinWords(others.map((at) => nameInSentence(context.players, at)));
+    const names = nameRows(context, others);
     const message = `0 and 00 may not both be on one roster, and ${names} ${others.length === 1 ? 'wears' : 'wear'} ${other}.`;
     for (const row of rows) {
       const suggestions = suggestFreeLabels(context, row, label);

@@ -1,7 +1,8 @@
 import { canonicalLabel } from '../../numbers/label-rules';
 import { readNumber, type NumberReading } from '../../numbers/label';
 import { type Garment, type RosterLine } from '../../roster/player';
-import { foldText, tidyText } from '../../text/normalise-text';
+import { countOf } from '../../text/count-of';
+import { foldText } from '../../text/normalise-text';
 import { splitPersonName } from '../../text/person-name';
 import { joinWords } from '../../text/sentence';
 import { type CompiledRuleSet } from '../compile-rule-set';
@@ -17,6 +18,8 @@ export type RosterContext = {
   keys: readonly (string | null)[];
   /** The rows that wear each such label, in order. */
   rowsByKey: ReadonlyMap<string, readonly number[]>;
+  /** How a sentence names the player of a row. */
+  nameOf: (row: number) => string;
 };
 
 /** One family of rules: looks at the roster and adds what it has to say. */
@@ -39,24 +42,37 @@ export function readRoster(
     if (rows === undefined) rowsByKey.set(key, [row]);
     else rows.push(row);
   });
-  return { rules, players, garments, readings, keys, rowsByKey };
+  return { rules, players, garments, readings, keys, rowsByKey, nameOf: makeNames(players) };
 }
 
 /**
- * How a sentence names a player: by surname, by given name and surname when another player has the same surname, by row
- * (counted from 1) when there is no name.
+ * How sentences name the players, made when first asked for: by surname, by given name and surname when another player
+ * has the same surname, by row (counted from 1) when there is no name.
  */
-export function nameInSentence(players: readonly RosterLine[], row: number): string {
-  const name = tidyText(players[row]?.name ?? '');
-  if (name === '') return `row ${row + 1}`;
-  const { given, surname } = splitPersonName(name);
-  const folded = foldText(surname);
-  const shared = players.some(
-    (other, at) => at !== row && foldText(splitPersonName(other.name).surname) === folded,
-  );
-  return shared && given !== '' ? `${given} ${surname}` : surname;
+function makeNames(players: readonly RosterLine[]): (row: number) => string {
+  let names: string[] | null = null;
+  return (row) => {
+    names ??= listNames(players);
+    return names[row] ?? `row ${row + 1}`;
+  };
 }
 
-/** The other players as owners at the end of a sentence: "Dunmore's", "Dunmore's and row 4's". */
-export const possessives = (players: readonly RosterLine[], rows: readonly number[]): string =>
-  joinWords(rows.map((row) => `${nameInSentence(players, row)}'s`));
+function listNames(players: readonly RosterLine[]): string[] {
+  const split = players.map((player) => splitPersonName(player.name));
+  const counts = new Map<string, number>();
+  for (const { surname } of split) counts.set(foldText(surname), (counts.get(foldText(surname)) ?? 0) + 1);
+  return split.map(({ given, surname }, row) => {
+    if (surname === '') return `row ${row + 1}`;
+    const shared = (counts.get(foldText(surname)) ?? 0) > 1;
+    return shared && given !== '' ? `${given} ${surname}` : surname;
+  });
+}
+
+const mostNamed = 3;
+
+/** The players of some rows in a sentence, three by name at most: "Dunmore", "Dunmore and Ellery", "… and 16 others". */
+export function nameRows(context: RosterContext, rows: readonly number[], ending = ''): string {
+  const names = rows.slice(0, mostNamed).map((row) => `${context.nameOf(row)}${ending}`);
+  const left = rows.length - names.length;
+  return joinWords(left === 0 ? names : [...names, countOf(left, 'other')]);
+}
