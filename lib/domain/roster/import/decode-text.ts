@@ -64,7 +64,7 @@ const highPunctuation = '€\u0081‚ƒ„…†‡ˆ‰Š‹Œ\u008DŽ\u008F\u0
  * Some versions of Node.js read Windows-1252 as ISO 8859-1, so that an apostrophe (byte 92) comes out as an invisible
  * control character; a right reading is left as it is.
  */
-const mendWindows1252 = (text: string, label: EncodingLabel): string =>
+const mendWindows1252 = (text: string, label: string): string =>
   label === 'windows-1252'
     ? text.replace(/[\u0080-\u009F]/g, (control) => highPunctuation[control.charCodeAt(0) - 0x80] ?? control)
     : text;
