@@ -7,7 +7,7 @@ import type { Role } from '@/lib/domain/access/permissions';
 import { formatInstant } from '@/lib/domain/dates/format';
 import { joinWords } from '@/lib/domain/text/sentence';
 import { AppError, notFound } from '@/lib/platform/errors';
-import type { ActorContext, RequestContext } from './context';
+import type { RequestContext } from './context';
 import { links } from './links';
 
 /** How long an invitation can be accepted. Our own figure. */
@@ -25,7 +25,7 @@ export async function assertTeams(tx: LeagueTx, teamIds: readonly string[]): Pro
 /** Queues the letter with an invitation's link; the link itself is nowhere else. */
 export async function mailInvitation(
   tx: LeagueTx,
-  ctx: ActorContext,
+  ctx: RequestContext & { league: { name: string; timeZone: string }; actor: { name: string } },
   invitation: { email: string; role: Role; teams: readonly TeamName[]; token: string; expiresAt: Date },
 ): Promise<void> {
   await queueEmail(tx, ctx, invitation.email, {

@@ -27,6 +27,9 @@ export const oldPasswordBudget: RateBudget = { name: 'old-password', points: 10,
 /** Invitations one league may send: enough for a large one, too few to be of use to somebody who sends junk. */
 export const invitationBudget: RateBudget = { name: 'invitations', points: 300, seconds: hour };
 
+/** Leagues one person may create: enough for a club with several sports. */
+export const leagueBudget: RateBudget = { name: 'new-leagues', points: 10, seconds: 24 * hour };
+
 /** Takes a point; when the budget is spent throws `too-many` with `says` and how long to wait. */
 export async function spend(budget: RateBudget, key: string, says: string): Promise<void> {
   const wait = await takeRatePoint(budget, key);
@@ -36,5 +39,6 @@ export async function spend(budget: RateBudget, key: string, says: string): Prom
 
 function describeWait(seconds: number): string {
   const minutes = Math.ceil(seconds / 60);
+  if (minutes > 90) return `Wait ${Math.ceil(minutes / 60)} hours.`;
   return minutes === 1 ? 'Wait a minute.' : `Wait ${minutes} minutes.`;
 }

@@ -1,0 +1,71 @@
+import { z } from 'zod';
+import { daySchema } from '@/lib/domain/dates/day';
+import { listSeasonFaults } from '@/lib/domain/dates/list-season-faults';
+import { localDateTimeSchema } from '@/lib/domain/dates/zone';
+import { quoteText } from '@/lib/domain/text/sentence';
+import { emailSchema } from '../account/account-schemas';
+import { leagueFieldsSchema } from './league-schemas';
+
+const text = (most: number, empty: string) =>
+  z.string().trim().min(1, empty).max(most, `Write at most ${most} characters.`);
+
+const seasonSchema = z
+  .object({
+    name: text(80, 'Name the season, such as Spring 2027.'),
+    sport: text(60, 'Name the sport.'),
+    rosterOpensOn: daySchema,
+    /** On clocks of the league's time zone. */
+    freezesAt: localDateTimeSchema,
+    handOutOn: daySchema,
+    firstMatchOn: daySchema,
+  })
+  .superRefine((season, context) => {
+    const days = { ...season, freezeOn: season.freezesAt.slice(0, 10) };
+    for (const [field, message] of Object.entries(listSeasonFaults(days))) {
+      context.addIssue({ code: 'custom', path: [field === 'freezeOn' ? 'freezesAt' : field], message });
+    }
+  });
+
+const limit = z.coerce.number<string | number>('Write a whole number.').int('Write a whole number.');
+const divisionSchema = z
+  .object({
+    name: text(80, 'Name the division, such as Under 12 mixed.'),
+    ageBand: z.string().trim().max(40, 'Write at most 40 characters.').default(''),
+    leastPlayers: limit.min(0, 'Not below 0.').max(200, 'At most 200.'),
+    mostPlayers: limit.min(1, 'At least 1.').max(200, 'At most 200.'),
+    starterKitId: z.string().max(60),
+    /** A code of the catalogue, or null for rules that allow every number from 0 to 99. */
+    presetId: z.string().max(80).nullable(),
+  })
+  .refine((division) => division.leastPlayers <= division.mostPlayers, {
+    path: ['mostPlayers'],
+    error: 'The most players cannot be fewer than the least.',
+  });
+
+const mostManagers = 60;
+/** Addresses as people paste them: a line each, or with commas, semicolons or blanks between. */
+const addressListSchema = z
+  .string()
+  .max(6000, 'Write fewer addresses; more people can be invited later.')
+  .transform((list, context) => {
+    const words = [...new Set(list.split(/[\s,;]+/).filter((word) => word !== ''))];
+    const read = words.map((word) => ({ word, email: emailSchema.safeParse(word).data }));
+    const bad = read.find((entry) => entry.email === undefined);
+    if (bad) {
+      context.addIssue({ code: 'custom', message: `${quoteText(bad.word)} is not an e-mail address.` });
+    } else if (read.length > mostManagers) {
+      context.addIssue({
+        code: 'custom',
+        message: `Invite at most ${mostManagers} now, and the others later.`,
+      });
+    }
+    return [...new Set(read.flatMap((entry) => entry.email ?? []))];
+  });
+
+export const createLeagueSchema = z.object({
+  league: leagueFieldsSchema.pick({ name: true, timeZone: true, unit: true, paper: true, currency: true }),
+  season: seasonSchema,
+  division: divisionSchema,
+  managers: addressListSchema,
+});
+export type CreateLeagueInput = z.input<typeof createLeagueSchema>;
