@@ -1,5 +1,7 @@
-import type { TaskList } from 'graphile-worker';
+import type { Task } from 'graphile-worker';
+import type { Job } from '@/db/queries/jobs';
 import { handleBuildBundle } from './handlers/build-bundle';
+import { handleFreezeRosters } from './handlers/freeze-rosters';
 import { handleSendEmail } from './handlers/send-email';
 import { handleTidy } from './handlers/tidy';
 
@@ -11,8 +13,9 @@ import { handleTidy } from './handlers/tidy';
 export const taskList = {
   'send-email': handleSendEmail,
   'build-bundle': handleBuildBundle,
+  'freeze-rosters': handleFreezeRosters,
   tidy: handleTidy,
-} satisfies TaskList;
+} satisfies Record<Job['task'] | 'tidy', Task>;
 
 /** What the worker starts by itself, in crontab form (UTC). One of them does it, however many workers run. */
 export const crontab = '17 * * * * tidy ?max=1';

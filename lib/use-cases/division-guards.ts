@@ -1,0 +1,46 @@
+import type { DivisionFields } from '@/db/queries/divisions';
+import { listDivisionViews, type DivisionView } from '@/db/queries/division-view';
+import { enqueueJob } from '@/db/queries/jobs';
+import { listRuleSets } from '@/db/queries/rule-sets';
+import type { LeagueTx } from '@/db/tenant';
+import { toInstant } from '@/lib/domain/dates/zone';
+import { AppError, notFound } from '@/lib/platform/errors';
+import type { ActorContext } from './context';
+
+type Input = Omit<DivisionFields, 'freezesAt'> & { freezesAt: string | null };
+
+/**
+ * The fields of a division as they are stored, once its rule set is known to belong to the league and no other division
+ * of the season (but `ownId`) has its name.
+ */
+export async function readDivisionFields(
+  tx: LeagueTx,
+  ctx: ActorContext,
+  input: Input,
+  place: { seasonId: string; ownId: string | null },
+): Promise<{ fields: DivisionFields; others: DivisionView[] }> {
+  if (!(await listRuleSets(tx)).some((ruleSet) => ruleSet.id === input.ruleSetId)) throw notFound('rule set');
+  const others = (await listDivisionViews(tx, place.seasonId)).filter(
+    (division) => division.id !== place.ownId,
+  );
+  if (others.some((division) => division.name.toLowerCase() === input.name.toLowerCase())) {
+    const message = `This season has a division called ${input.name} already. Choose another name.`;
+    throw new AppError('conflict', message, { fields: { 'fields.name': message } });
+  }
+  const freezesAt = input.freezesAt === null ? null : toInstant(input.freezesAt, ctx.league.timeZone).instant;
+  const { name, ageBand, level, ruleSetId, leastPlayers, mostPlayers } = input;
+  return { fields: { name, ageBand, level, ruleSetId, leastPlayers, mostPlayers, freezesAt }, others };
+}
+
+/** Puts a division's own freeze on the worker's calendar; the season's freeze stands there already. */
+export async function scheduleOwnFreeze(
+  tx: LeagueTx,
+  division: { id: string; seasonId: string; freezesAt: Date | null },
+): Promise<void> {
+  if (division.freezesAt === null) return;
+  await enqueueJob(
+    tx,
+    { task: 'freeze-rosters', payload: { leagueId: tx.leagueId, seasonId: division.seasonId } },
+    { key: `freeze:${division.seasonId}:${division.id}`, runAt: division.freezesAt },
+  );
+}
