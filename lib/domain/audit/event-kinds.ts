@@ -54,7 +54,3 @@ const kindOf: Record<AuditEvent['type'], EventKind> = {
 /** The types of event that belong to a kind. */
 export const listTypesOfKind = (kind: EventKind): string[] =>
   Object.entries(kindOf).flatMap(([type, of]) => (of === kind ? [type] : []));
-
-/** The kind an event belongs to; null for a type this version does not know. */
-export const findKind = (type: string): EventKind | null =>
-  Object.entries(kindOf).find(([known]) => known === type)?.[1] ?? null;
