@@ -57,7 +57,7 @@ async function ensureRoles(client, passwords) {
 
 /**
  * Makes sure that the private cluster has the roles and a database owned by raglan_owner.
- * @param {import('./cluster.mjs').Cluster} cluster
+ * @param {Pick<import('./cluster.mjs').Cluster, 'port' | 'passwords'>} cluster
  * @param {string} [database]
  * @returns {Promise<DatabaseUrls>}
  */

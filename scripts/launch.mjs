@@ -1,26 +1,12 @@
 // What `npm start` and `npm run dev` share: from a bare clone to a running application, and back down again.
-import fs from 'node:fs';
-import path from 'node:path';
 import { checkNode, ensurePackages } from './prepare.mjs';
-import { dataFolder, makeDataFolder, root } from './place.mjs';
+import { makeDataFolder, root } from './place.mjs';
 import { findFreePort, isPortFree } from './ports.mjs';
+import { findRunning, forgetRunning, noteRunning } from './running.mjs';
 import { endRunning, lastLines, run } from './run.mjs';
 import { Halt, say, sayFailure, secondsSince } from './say.mjs';
 import { readLogTail, Services, waitUntilReady } from './services.mjs';
 import { demoPassword, demoSignIns, makeEnvironments, readSecret, readSettings } from './settings.mjs';
-
-const lockFile = path.join(dataFolder, 'running.json');
-
-/** The launcher that runs from this folder at the moment, if any. @returns {{ pid: number, url: string } | null} */
-export function findRunning() {
-  try {
-    const noted = JSON.parse(fs.readFileSync(lockFile, 'utf8'));
-    const command = fs.readFileSync(`/proc/${noted.pid}/cmdline`, 'utf8');
-    return /scripts\/(start|dev)\.mjs/.test(command) ? noted : null;
-  } catch {
-    return null; // no note, or its process is gone
-  }
-}
 
 /** @param {string} what @param {string} script @param {NodeJS.ProcessEnv} env */
 export async function runTypeScript(what, script, env) {
@@ -42,7 +28,7 @@ async function checkNothingInTheWay({ port, host, baseUrl }) {
       `Port ${port} is taken by another program. Stop it, or choose another port: PORT=${port + 1} npm start`,
     );
   }
-  fs.writeFileSync(lockFile, JSON.stringify({ pid: process.pid, url: baseUrl }));
+  noteRunning(baseUrl);
 }
 
 /**
@@ -114,7 +100,7 @@ export async function launch(mode) {
     makeDataFolder();
     const settings = readSettings();
     await checkNothingInTheWay(settings);
-    closers.push(async () => fs.rmSync(lockFile, { force: true }));
+    closers.push(async () => forgetRunning());
     await ensurePackages();
     stopIfAsked();
 

@@ -8,10 +8,10 @@ import { Halt } from './say.mjs';
 export const root = path.resolve(import.meta.dirname, '..');
 
 /** What one installation keeps: the private database, passwords, the secret, logs. Never committed. */
-export const dataFolder = path.join(root, '.data');
+export const dataFolder = path.resolve(process.env.RAGLAN_DATA_DIR || path.join(root, '.data'));
 
-/** Names this project folder among others on the same machine. */
-export const placeKey = createHash('sha256').update(root).digest('hex').slice(0, 12);
+/** Names this installation among others on the same machine. */
+export const placeKey = createHash('sha256').update(dataFolder).digest('hex').slice(0, 12);
 
 /** Makes `.data/` if it is missing; others may pass through (the database's own user must), not look inside. */
 export function makeDataFolder() {

@@ -2,7 +2,7 @@
 import fs from 'node:fs';
 import path from 'node:path';
 import { installFromDebian } from './debian.mjs';
-import { run } from './run.mjs';
+import { isInPath, run } from './run.mjs';
 
 const debianHome = '/usr/lib/postgresql';
 
@@ -36,4 +36,20 @@ export async function requireServers() {
   if (found.length > 0) return found;
   await installFromDebian(['postgresql'], 'is needed for the database');
   return listServers();
+}
+
+/**
+ * The folder of pg_dump and pg_restore, ending in a slash; empty when those in PATH will do. Newest first: an older
+ * pg_dump refuses a newer server.
+ */
+export async function findClientPrograms() {
+  const versions = fs.existsSync(debianHome) ? fs.readdirSync(debianHome) : [];
+  versions.sort((a, b) => Number(b) - Number(a));
+  const bin = versions
+    .map((version) => path.join(debianHome, version, 'bin/'))
+    .find((folder) => fs.existsSync(`${folder}pg_dump`));
+  if (bin) return bin;
+  if (await isInPath('pg_dump')) return '';
+  await installFromDebian(['postgresql-client'], 'is needed to read and write backups');
+  return '';
 }
