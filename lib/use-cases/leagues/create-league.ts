@@ -78,7 +78,7 @@ async function openSeason(
   const id = ctx.newId();
   const slug = makeSlug(season.name, 'season');
   const freezesAt = toInstant(season.freezesAt, league.timeZone).instant;
-  await insertSeason(tx, { ...season, id, slug, freezesAt, releaseOn: null, now: ctx.now });
+  await insertSeason(tx, { ...season, id, slug, freezesAt, now: ctx.now });
   await setCurrentSeason(tx, id);
   await note({ type: 'season opened', subjectId: id, data: { name: season.name } });
   await enqueueJob(

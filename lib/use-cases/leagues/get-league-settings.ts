@@ -10,4 +10,3 @@ export async function getLeagueSettings(ctx: ActorContext) {
   if (!settings) throw notFound('league');
   return settings;
 }
-export type LeagueSettings = Awaited<ReturnType<typeof getLeagueSettings>>;

@@ -18,6 +18,5 @@ export const leagueFieldsSchema = z.object({
   contactEmail: z.preprocess((value) => (value === '' ? null : value), emailSchema.nullable()).default(null),
   shipTo: z.string().trim().max(500, 'Write at most 500 characters.').default(''),
 });
-export type LeagueInput = z.input<typeof leagueFieldsSchema>;
 
 export const changeLeagueSchema = leagueFieldsSchema.extend({ rowVersion: z.int() });

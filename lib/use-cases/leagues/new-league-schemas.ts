@@ -1,30 +1,11 @@
 import { z } from 'zod';
-import { daySchema } from '@/lib/domain/dates/day';
-import { listSeasonFaults } from '@/lib/domain/dates/list-season-faults';
-import { localDateTimeSchema } from '@/lib/domain/dates/zone';
 import { quoteText } from '@/lib/domain/text/sentence';
 import { emailSchema } from '../account/account-schemas';
+import { seasonFieldsSchema } from '../seasons/season-schemas';
 import { leagueFieldsSchema } from './league-schemas';
 
 const text = (most: number, empty: string) =>
   z.string().trim().min(1, empty).max(most, `Write at most ${most} characters.`);
-
-const seasonSchema = z
-  .object({
-    name: text(80, 'Name the season, such as Spring 2027.'),
-    sport: text(60, 'Name the sport.'),
-    rosterOpensOn: daySchema,
-    /** On clocks of the league's time zone. */
-    freezesAt: localDateTimeSchema,
-    handOutOn: daySchema,
-    firstMatchOn: daySchema,
-  })
-  .superRefine((season, context) => {
-    const days = { ...season, freezeOn: season.freezesAt.slice(0, 10) };
-    for (const [field, message] of Object.entries(listSeasonFaults(days))) {
-      context.addIssue({ code: 'custom', path: [field === 'freezeOn' ? 'freezesAt' : field], message });
-    }
-  });
 
 const limit = z.coerce.number<string | number>('Write a whole number.').int('Write a whole number.');
 const divisionSchema = z
@@ -64,7 +45,8 @@ const addressListSchema = z
 
 export const createLeagueSchema = z.object({
   league: leagueFieldsSchema.pick({ name: true, timeZone: true, unit: true, paper: true, currency: true }),
-  season: seasonSchema,
+  /** The freeze is read on clocks of the league's time zone. */
+  season: seasonFieldsSchema,
   division: divisionSchema,
   managers: addressListSchema,
 });

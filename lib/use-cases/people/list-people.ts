@@ -22,4 +22,3 @@ export async function listPeople(ctx: ActorContext) {
     };
   });
 }
-export type People = Awaited<ReturnType<typeof listPeople>>;

@@ -21,6 +21,7 @@ const input = (name: string, more: Partial<CreateLeagueInput> = {}): CreateLeagu
     sport: 'basketball',
     rosterOpensOn: '2027-03-02',
     freezesAt: '2027-03-20T18:00',
+    releaseOn: null,
     handOutOn: '2027-04-20',
     firstMatchOn: '2027-04-24',
   },

@@ -19,6 +19,8 @@ export type Draft = {
     sport: string;
     rosterOpensOn: string;
     freezesAt: string;
+    /** Planned on the page of dates, once there is a season. */
+    releaseOn: null;
     handOutOn: string;
     firstMatchOn: string;
   };
@@ -50,6 +52,7 @@ export const startDraft = (days: SeasonDays, kits: readonly KitChoice[]): Draft 
     sport: '',
     rosterOpensOn: days.rosterOpensOn,
     freezesAt: `${days.freezeOn}T18:00`,
+    releaseOn: null,
     handOutOn: days.handOutOn,
     firstMatchOn: days.firstMatchOn,
   },
