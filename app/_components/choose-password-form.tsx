@@ -1,6 +1,6 @@
 'use client';
 
-import { useState, type FormEvent } from 'react';
+import { useRef, useState, type FormEvent } from 'react';
 import { passwordLimits } from '@/lib/domain/access/password-policy';
 import { SubmitButton } from '@/components/ui/submit-button';
 import type { ActionResult } from '@/lib/web/action-result';
@@ -29,17 +29,18 @@ export function ChoosePasswordForm({
   button: string;
 }) {
   const [entering, setEntering] = useState(false);
-  const [password, setPassword] = useState('');
+  const password = useRef('');
   const { submit, pending, failure, fields } = useSubmit(choose, async (data) => {
     setEntering(true);
     // If that fails, the page it leads to is the sign-in page, and it says so there.
-    await enter(data.email, password);
+    await enter(data.email, password.current);
     window.location.assign(onward);
   });
 
   const send = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
-    void submit({ token, password: readText(new FormData(event.currentTarget), 'password') });
+    password.current = readText(new FormData(event.currentTarget), 'password');
+    void submit({ token, password: password.current });
   };
 
   return (
@@ -52,8 +53,6 @@ export function ChoosePasswordForm({
         kind="new"
         hint={passwordHint}
         error={fields['password']}
-        value={password}
-        onChange={setPassword}
       />
       <SubmitButton pending={pending || entering} wide>
         {button}

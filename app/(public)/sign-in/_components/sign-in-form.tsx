@@ -1,8 +1,9 @@
 'use client';
 
-import { useState, type FormEvent } from 'react';
+import { useRef, useState, type FormEvent } from 'react';
 import { enter } from '@/app/_components/enter';
 import { PasswordField } from '@/app/_components/password-field';
+import { readText } from '@/app/_components/use-submit';
 import { TextField } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
 import { Seam } from '@/components/ui/seam';
@@ -22,19 +23,20 @@ export function SignInForm({
   failed: boolean;
   demo: boolean;
 }) {
-  const [email, setEmail] = useState('');
-  const [password, setPassword] = useState('');
+  // The inputs keep their own text: a browser may have filled them before this code has run.
+  const form = useRef<HTMLFormElement>(null);
   const [pending, setPending] = useState(false);
   const [failure, setFailure] = useState<string | null>(
     failed ? 'Signing in did not work. Try it once more.' : null,
   );
 
-  const send = async (event: FormEvent) => {
+  const send = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
     if (pending) return;
+    const typed = new FormData(event.currentTarget);
     setPending(true);
     setFailure(null);
-    const says = await enter(email, password);
+    const says = await enter(readText(typed, 'email'), readText(typed, 'password'));
     if (says === null) {
       // A whole new page: nothing that was shown to somebody else before stays in this tab's memory.
       window.location.assign(onward);
@@ -46,7 +48,7 @@ export function SignInForm({
 
   return (
     <>
-      <form method="post" onSubmit={(event) => void send(event)} className="grid gap-4">
+      <form ref={form} method="post" onSubmit={(event) => void send(event)} className="grid gap-4">
         {failure !== null && (
           <Notice tone="stop" live="assertive">
             {failure}
@@ -60,16 +62,8 @@ export function SignInForm({
           autoComplete="username"
           required
           maxLength={254}
-          value={email}
-          onChange={(event) => setEmail(event.target.value)}
         />
-        <PasswordField
-          label="Password"
-          name="password"
-          kind="current"
-          value={password}
-          onChange={setPassword}
-        />
+        <PasswordField label="Password" name="password" kind="current" />
         <SubmitButton pending={pending} wide>
           Sign in
         </SubmitButton>
@@ -82,8 +76,7 @@ export function SignInForm({
           <Seam className="my-5" />
           <DemoSignIns
             onChoose={(account) => {
-              setEmail(account.email);
-              setPassword(account.password);
+              fill(form.current, account);
               setFailure(null);
             }}
           />
@@ -91,4 +84,11 @@ export function SignInForm({
       )}
     </>
   );
+}
+
+function fill(form: HTMLFormElement | null, texts: Record<string, string>): void {
+  for (const [name, text] of Object.entries(texts)) {
+    const input = form?.elements.namedItem(name);
+    if (input instanceof HTMLInputElement) input.value = text;
+  }
 }

@@ -1,6 +1,6 @@
 'use client';
 
-import { useState, type FormEvent } from 'react';
+import { useRef, type FormEvent } from 'react';
 import { passwordHint } from '@/app/_components/choose-password-form';
 import { enter } from '@/app/_components/enter';
 import { FormFailure } from '@/app/_components/form-failure';
@@ -26,15 +26,17 @@ export function JoinAsNewcomer({
   }) => Promise<ActionResult<{ email: string }>>;
   onward: string;
 }) {
-  const [password, setPassword] = useState('');
+  const password = useRef('');
   const { submit, pending, failure, fields } = useSubmit(join, async () => {
-    await enter(email, password);
+    await enter(email, password.current);
     window.location.assign(onward);
   });
 
   const send = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
-    void submit({ token, name: readText(new FormData(event.currentTarget), 'name'), password });
+    const typed = new FormData(event.currentTarget);
+    password.current = readText(typed, 'password');
+    void submit({ token, name: readText(typed, 'name'), password: password.current });
   };
 
   return (
@@ -58,8 +60,6 @@ export function JoinAsNewcomer({
         kind="new"
         hint={passwordHint}
         error={fields['password']}
-        value={password}
-        onChange={setPassword}
       />
       <SubmitButton pending={pending} wide>
         Open the account and join
