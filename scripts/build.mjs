@@ -63,7 +63,7 @@ export function isBuilt(folder, hash) {
  * @param {string} folder
  */
 export async function buildCommands(folder) {
-  const { build, formatMessages } = await import('esbuild');
+  const { build, formatMessages, stop } = await import('esbuild');
   try {
     await build({
       absWorkingDir: root,
@@ -82,6 +82,8 @@ export async function buildCommands(folder) {
     const { errors = [] } = /** @type {import('esbuild').BuildFailure} */ (error);
     const lines = await formatMessages(errors, { kind: 'error', color: false });
     throw new Halt(`Building the worker failed:\n\n${lines.join('') || error}`);
+  } finally {
+    await stop(); // esbuild keeps a helper process otherwise
   }
 }
 
