@@ -155,6 +155,15 @@ describe('headings', () => {
     ).toBeNull();
   });
 
+  it('are never a row of data that happens to hold a heading word', () => {
+    expect(
+      findHeadingRow([
+        ['Last', '7'],
+        ['Quill', '8'],
+      ]),
+    ).toBeNull();
+  });
+
   it('have one signature whatever their case, accents and punctuation', () => {
     expect(headingSignature(['Name', 'No.', 'Größe'])).toBe(
       headingSignature(['NAME ', 'no', 'Grösse'.replace('ss', 'ß')]),

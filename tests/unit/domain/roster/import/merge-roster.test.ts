@@ -53,6 +53,9 @@ describe('planMerge', () => {
       extra: { Parent: 'Jo', Bus: 'yes' },
     });
     expect(plan.changed[0]?.before.line.number).toBe('7');
+    const bare = planMerge([before], [incoming('tilly vane', '', { nameOnBack: 'VANE' })]).changed[0]?.after
+      .line;
+    expect(bare).toMatchObject({ name: 'tilly vane', nameOnBack: 'VANE', number: '7', role: 'captain' });
   });
 
   it('lists players the file does not name, and those it changes nothing about', () => {

@@ -138,8 +138,8 @@ describe('readRoster', () => {
       fc
         .constantFrom('name', 'firstName', 'lastName', 'nameOnBack', 'number', 'role')
         .map((field) => ({ field })),
-      fc.constant({ field: 'size' as const, garments: ['home-shirt'] }),
-      fc.constantFrom({ field: 'extra' as const }, { field: 'leave out' as const }),
+      fc.constant<ColumnTarget>({ field: 'size', garments: ['home-shirt'] }),
+      fc.constantFrom<ColumnTarget[]>({ field: 'extra' }, { field: 'leave out' }),
     );
     const mapping = fc.record({
       headerRow: fc.option(fc.nat(12)),
