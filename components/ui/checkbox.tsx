@@ -27,12 +27,12 @@ export function Checkbox({
           type="checkbox"
           aria-describedby={said || undefined}
           aria-invalid={error === undefined ? undefined : true}
-          className={joinClasses(tickBox, 'rounded-[4px] self-start')}
+          className={joinClasses(tickBox, 'mt-0! rounded-[4px]')}
         />
         <svg
           aria-hidden="true"
           viewBox="0 0 16 16"
-          className="text-on-ink pointer-events-none absolute left-px mt-0.5 hidden size-4 self-start peer-checked:block"
+          className="text-on-ink pointer-events-none absolute left-px hidden size-4 peer-checked:block"
         >
           <path fill="none" stroke="currentColor" strokeWidth="2.2" d="M3.5 8.3l3 3L12.5 5" />
         </svg>

@@ -11,7 +11,7 @@ import { Table, Tbody, Td, Th, Thead, Tr } from '@/components/ui/table';
 import { buildNumberRail } from '@/lib/domain/numbers/number-rail';
 import type { Finding, FindingField } from '@/lib/domain/rules/finding';
 import { countOf } from '@/lib/domain/text/count-of';
-import type { Checked } from './roster-check-form';
+import type { Checked } from './checked';
 
 /** What the check found, each finding beside the player it is about; the focus moves here so that it is read out. */
 export function CheckResult({ checked }: { checked: Checked }) {

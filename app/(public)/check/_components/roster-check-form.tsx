@@ -10,35 +10,12 @@ import { Select } from '@/components/ui/select';
 import { Textarea } from '@/components/ui/textarea';
 import { guessMapping } from '@/lib/domain/roster/import/column-mapping';
 import { fileLimits } from '@/lib/domain/roster/import/limits';
-import { readRoster, type RefusedRow } from '@/lib/domain/roster/import/read-roster';
-import type { RosterLine } from '@/lib/domain/roster/player';
+import { readRoster } from '@/lib/domain/roster/import/read-roster';
 import type { CheckSummary, Finding } from '@/lib/domain/rules/finding';
-import type { Citation, RuleSet } from '@/lib/domain/rules/rule-set';
 import { countOf } from '@/lib/domain/text/count-of';
 import { CheckResult } from './check-result';
+import type { Checked, CheckPreset } from './checked';
 import { readFile, readPaste, type Reading } from './read-file';
-
-export type CheckPreset = {
-  id: string;
-  sport: string;
-  title: string;
-  citations: Citation[];
-  open: string[];
-  checkYourBook: string;
-  ruleSet: RuleSet;
-};
-
-/** What was checked, kept together so that the answer always stands beside the list it belongs to. */
-export type Checked = {
-  preset: CheckPreset;
-  from: string;
-  lines: RosterLine[];
-  rowNumbers: number[];
-  notes: string[];
-  refused: RefusedRow[];
-  findings: Finding[];
-  summary: CheckSummary;
-};
 
 const sample = `Player\tNumber\tName on back
 Adisa, Wren\t4\tADISA

@@ -50,7 +50,7 @@ export function ReadinessTable({
         columns={columns}
         getRowId={(team) => team.id}
         searchLabel="Find a team or player"
-        onClearFilters={() => setChip('all')}
+        {...(chip !== 'all' && { onClearFilters: () => setChip('all') })}
         onOpenRow={(team) => router.push(paths.roster(league, season, team.slug))}
         toolbar={
           <FilterChips

@@ -1,0 +1,41 @@
+import { expect, test } from '@playwright/test';
+import { expectAccessible, expectNoSidewaysScroll, listenForErrors, signIn } from './support/people';
+
+test.use({ viewport: { width: 390, height: 844 } });
+
+test('a referee compares two teams on a phone: who wears what, numbers that clash, kits that clash', async ({
+  page,
+}) => {
+  const errors = listenForErrors(page);
+  await signIn(page, 'referee@tern.example');
+  await page.waitForURL(/\/match\/tern-estuary\//);
+  await page.getByLabel('Home', { exact: true }).selectOption('Herons');
+  await page.getByLabel('Away', { exact: true }).selectOption('Otters');
+  await expect(
+    page.getByText('14 is on 2 shirts: Calloway and Dunmore. One must change before play.'),
+  ).toBeVisible();
+  await expect(page.getByText(/Kits clear/)).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await expectAccessible(page);
+
+  // A match is an address of its own: it can be kept and opened again.
+  await page.reload();
+  await expect(page.getByRole('heading', { name: 'Otters' }).first()).toBeVisible();
+  await page.getByRole('button', { name: 'Swap home and away' }).click();
+  await expect(page.getByLabel('Home', { exact: true })).toHaveValue('otters');
+  expect(errors).toEqual([]);
+});
+
+test('a referee sees no sizes, no rosters and no people of the league', async ({ page }) => {
+  await signIn(page, 'referee@tern.example');
+  const season = new URL(page.url()).pathname.split('/')[3] ?? '';
+  for (const path of [
+    `/tern-estuary/${season}/rosters/otters`,
+    '/tern-estuary/people',
+    `/tern-estuary/${season}/batches`,
+    '/pellbrook-valley/people',
+  ]) {
+    const response = await page.goto(path);
+    expect([path, response?.status()]).toEqual([path, 404]);
+  }
+});
