@@ -9,7 +9,7 @@ import { sniffFile } from './sniff-file';
 export type UploadTable = { name: string; rows: string[][]; problems: TableProblem[]; notes: string[] };
 
 /** How a text file was read, for the screen to show and a person to change. */
-export type TextReading = { encoding: string; sure: boolean; sample: string[]; delimiter: Delimiter };
+type TextReading = { encoding: string; sure: boolean; sample: string[]; delimiter: Delimiter };
 
 /** A file as tables, or the sentence that says why it is refused. `text` is null for workbooks. */
 export type UploadResult =

@@ -20,7 +20,7 @@ import {
 } from './workbook-parts';
 
 /** A sheet as rows of text, `rows[0]` being row 1; `notes` say what the sheet held besides plain text and numbers. */
-export type WorkbookSheet = { name: string; rows: string[][]; notes: string[] };
+type WorkbookSheet = { name: string; rows: string[][]; notes: string[] };
 
 /** The visible sheets that hold anything; `notes` name those that were left out and why. */
 export type WorkbookResult = { ok: true; sheets: WorkbookSheet[]; notes: string[] } | Refusal;

@@ -4,7 +4,7 @@ import { inflateRaw } from 'node:zlib';
 const inflate = promisify(inflateRaw);
 
 /** What an archive may be: unpacked `bytes` in all, `ratio` of unpacked to packed (from 1 MB up), number of `entries`. */
-export const zipLimits = { bytes: 60 * 1024 * 1024, ratio: 100, entries: 2000 } as const;
+const zipLimits = { bytes: 60 * 1024 * 1024, ratio: 100, entries: 2000 } as const;
 const ratioCountsFrom = 1024 * 1024;
 
 /** One file of an archive, as its directory describes it; sizes are claims until it has been unpacked. */

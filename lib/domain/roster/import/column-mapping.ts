@@ -10,7 +10,7 @@ import { findSize } from './match-size';
  * What a column of a list of players holds. One size column may serve several garments; `extra` is kept beside the
  * player under its heading; `leave out` is never guessed: only a person may choose to leave a column behind.
  */
-export const columnTargetSchema = z.discriminatedUnion('field', [
+const columnTargetSchema = z.discriminatedUnion('field', [
   z.object({ field: z.enum(playerFields) }),
   z.object({ field: z.literal('size'), garments: z.array(z.string().min(1).max(40)).min(1).max(20) }),
   z.object({ field: z.literal('extra') }),

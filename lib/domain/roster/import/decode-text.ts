@@ -2,7 +2,7 @@ import { refuseSize } from './limits';
 import { refuse, type Refusal } from './refusal';
 
 /** Encodings recognised without being told. */
-export type TextEncoding = 'UTF-8' | 'UTF-8 with BOM' | 'UTF-16 LE' | 'UTF-16 BE' | 'Windows-1252';
+type TextEncoding = 'UTF-8' | 'UTF-8 with BOM' | 'UTF-16 LE' | 'UTF-16 BE' | 'Windows-1252';
 
 /** Encodings a person may choose when the guess shows wrong letters: our name, and the label of the Encoding Standard. */
 export const encodingChoices = [
@@ -21,7 +21,7 @@ export type EncodingLabel = (typeof encodingChoices)[number]['label'];
  * Text read from bytes. `sure` is false when the bytes would be just as valid in another encoding: then `sample` holds
  * up to five pieces of text with letters outside ASCII, for a person to look at, and `note` says so.
  */
-export type DecodedText = {
+type DecodedText = {
   ok: true;
   text: string;
   encoding: string;

@@ -1,16 +1,14 @@
 import Papa from 'papaparse';
-import { z } from 'zod';
 import { unguardCell } from './formula-guard';
 import { fileLimits, refuseColumnCount, refuseRowCount, refuseSize } from './limits';
 import { countDataRows } from './find-headings';
 import { isBlankRow } from './clean-cell';
 import { refuse, type Refusal } from './refusal';
 
-export const delimiters = [',', ';', '\t', '|'] as const;
-export type Delimiter = (typeof delimiters)[number];
+export type Delimiter = ',' | ';' | '\t' | '|';
 
 /** How the rows of a text end; `mixed` when there are several kinds, `none` when there is one row only. */
-export type LineEnd = 'CRLF' | 'LF' | 'CR' | 'mixed' | 'none';
+type LineEnd = 'CRLF' | 'LF' | 'CR' | 'mixed' | 'none';
 
 /** Something wrong with one row that was nevertheless kept; `rowNumber` counts from 1 as a spreadsheet does. */
 export type TableProblem = { rowNumber: number; message: string };
@@ -28,11 +26,6 @@ export type Table = {
   notes: string[];
 };
 export type TableResult = { ok: true; table: Table } | Refusal;
-
-/** Rows that come from a browser: no more of them, and no longer, than a file may hold. */
-export const tableRowsSchema = z
-  .array(z.array(z.string().max(10_000)).max(fileLimits.columns))
-  .max(fileLimits.rows + fileLimits.aboveHeadings + 1);
 
 /** Far beyond any list: a text with more line ends than this is refused before it is taken apart. */
 const mostLines = 200_000;

@@ -47,7 +47,7 @@ const totalWords =
  * Whether a row says of itself that it is a sum of the rows above: it begins with a word for a total, and no other
  * cell holds a word (Total is somebody's surname when a first name stands beside it).
  */
-export function isTotalsRow(cells: readonly string[]): boolean {
+function isTotalsRow(cells: readonly string[]): boolean {
   const [first, ...others] = cells.filter((cell) => cell.trim() !== '');
   return (
     first !== undefined &&

@@ -9,7 +9,7 @@ import { readColour, type ReadColour } from './read-colour';
 import type { TeamColumn, TeamMapping } from './team-mapping';
 
 /** A kit as far as a list of teams tells: its colour, and the number's colour when there is a column for it. */
-export type TeamLineKit = { colour: ReadColour; number: ReadColour | null };
+type TeamLineKit = { colour: ReadColour; number: ReadColour | null };
 
 /** One team to bring in. Kits are null where the list has no colour that can be read; `managers` are e-mail addresses. */
 export type TeamLine = {

@@ -4,7 +4,7 @@ import { findTeamField, teamFields } from './heading-words';
 import { fileLimits } from './limits';
 
 /** What a column of a list of teams holds; `extra` columns are shown but nothing reads them. */
-export const teamColumnSchema = z.enum([...teamFields, 'extra', 'leave out']);
+const teamColumnSchema = z.enum([...teamFields, 'extra', 'leave out']);
 export type TeamColumn = z.infer<typeof teamColumnSchema>;
 
 const headingRowSchema = z
