@@ -3,7 +3,7 @@
 import fs from 'node:fs';
 import path from 'node:path';
 import { randomBytes } from 'node:crypto';
-import { dataFolder, makeDataFolder, placeKey, readOrMake, root } from './place.mjs';
+import { dataFolder, makeDataFolder, placeKey, readOrMake } from './place.mjs';
 import { findFreePort, isAnswering, isPortFree } from './ports.mjs';
 import { requireServers } from './postgres-programs.mjs';
 import { lastLines, run } from './run.mjs';
@@ -63,7 +63,7 @@ async function findFolder(user) {
   if (fs.existsSync(path.join(inside, 'data'))) return inside;
   if (fs.existsSync(path.join(outside, 'data'))) return outside;
   if (user === null || (await runAs(user, 'test', ['-x', dataFolder])).code === 0) return inside;
-  say(`The user postgres cannot reach ${root}; the database goes to ${outside}.`);
+  say(`The user postgres cannot reach ${dataFolder}; the database goes to ${outside}.`);
   return outside;
 }
 
@@ -257,6 +257,21 @@ export async function stopCluster({ folder, user, bin }) {
     '--timeout=60',
     'stop',
   ]);
+}
+
+/**
+ * Rejects when the server no longer answers (three times running, two seconds apart); never resolves.
+ * @param {Cluster} cluster
+ * @returns {Promise<never>}
+ */
+export async function watchCluster({ folder, port }) {
+  for (let misses = 0; misses < 3;) {
+    await new Promise((resolve) => setTimeout(resolve, 2000).unref());
+    misses = (await isAnswering(port)) ? 0 : misses + 1;
+  }
+  throw new Halt(
+    `The private database has stopped, so Raglan stops. Its log is ${path.join(folder, 'server.log')}; the next npm start puts its files in order.`,
+  );
 }
 
 /**

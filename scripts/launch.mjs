@@ -40,15 +40,17 @@ async function openDatabase(databaseUrl) {
     say('Using the database that DATABASE_URL names.');
     const { prepareForeignDatabase } = await import('./database.mjs');
     const urls = await prepareForeignDatabase(databaseUrl, process.env.RAGLAN_DATABASE_URL || undefined);
-    return { urls, close: async () => {} };
+    return { urls, close: async () => {}, failed: new Promise(() => {}) };
   }
-  const { openCluster, stopCluster } = await import('./cluster.mjs');
+  const { openCluster, stopCluster, watchCluster } = await import('./cluster.mjs');
   const cluster = await openCluster();
   say(`Private database on 127.0.0.1:${cluster.port}.`);
   const close = () => stopCluster(cluster);
   try {
     const { ensureDatabase } = await import('./database.mjs');
-    return { urls: await ensureDatabase(cluster), close };
+    const failed = watchCluster(cluster);
+    failed.catch(() => {}); // whoever waits for it sees it
+    return { urls: await ensureDatabase(cluster), close, failed };
   } catch (error) {
     await close();
     throw error;
@@ -190,7 +192,7 @@ export async function launch(mode) {
     });
     stopIfAsked();
     sayWelcome(settings.baseUrl, settings.demo, start, mode);
-    await Promise.race([askedToStop, services.failed]);
+    await Promise.race([askedToStop, services.failed, database.failed]);
   };
 
   let code = 0;

@@ -21,7 +21,7 @@ export function makeDataFolder() {
   } catch {
     const owner = fs.existsSync(dataFolder) ? `user ${fs.statSync(dataFolder).uid}` : 'another user';
     throw new Halt(
-      `This user may not write ${dataFolder}; it belongs to ${owner}. Run the command as that user, or give the folder to this one: chown -R $(id -u) ${root}`,
+      `This user may not write ${dataFolder}; it belongs to ${owner}. Run the command as that user, or give the folder to this one: chown -R $(id -u) ${dataFolder}`,
     );
   }
 }
