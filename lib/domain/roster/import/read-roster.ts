@@ -43,6 +43,9 @@ export type RosterReading = {
 const totalWords =
   /^(?:(?:grand |sub ?)?totals?|gesamt|gesamtsumme|summe|somme|totaal|totalt|totale)(?: (?:number )?(?:of )?(?:players|shirts|kits|pieces|teams))?(?: \p{Nd}+)?$|^(?:number of players|player count|head count)(?: \p{Nd}+)?$/u;
 
+/** Most rows are players: one quick look spares them the careful one. */
+const mayBeTotal = /tot|gesamt|summe|somme|players|count/i;
+
 /**
  * Whether a row says of itself that it is a sum of the rows above: it begins with a word for a total, and no other
  * cell holds a word (Total is somebody's surname when a first name stands beside it).
@@ -51,14 +54,16 @@ function isTotalsRow(cells: readonly string[]): boolean {
   const [first, ...others] = cells.filter((cell) => cell.trim() !== '');
   return (
     first !== undefined &&
+    mayBeTotal.test(first) &&
     totalWords.test(normaliseHeading(first)) &&
     others.every((cell) => /\p{N}/u.test(cell) || !/\p{L}/u.test(cell))
   );
 }
 
+const plainCell = (cell: string | undefined): string => (cell ?? '').trim().toLowerCase();
 const sameCells = (row: readonly string[], other: readonly string[]): boolean =>
-  Array.from({ length: Math.max(row.length, other.length) }).every(
-    (_, index) => normaliseHeading(row[index] ?? '') === normaliseHeading(other[index] ?? ''),
+  (row.length >= other.length ? row : other).every(
+    (_, index) => plainCell(row[index]) === plainCell(other[index]),
   );
 
 /** Why a row below the headings is no player, or null: the headings again, or a row of sums. */
