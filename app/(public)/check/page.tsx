@@ -3,6 +3,7 @@ import { PageHeader } from '@/components/ui/page-header';
 import { listCataloguePresets } from '@/lib/domain/rules/catalogue/catalogue';
 import { paths } from '@/lib/web/paths';
 import { RosterCheckForm } from './_components/roster-check-form';
+import { readWorkbookAction } from './actions';
 
 export const metadata: Metadata = {
   title: 'Check a roster',
@@ -34,7 +35,11 @@ export default function CheckPage() {
         title="Check a roster"
         subtitle="Paste or drop a list, choose a numbering code, and see what would be found at the press or on the field. Nothing is stored."
       />
-      <RosterCheckForm presets={presets} checkUrl={paths.api.rosterChecks()} />
+      <RosterCheckForm
+        presets={presets}
+        checkUrl={paths.api.rosterChecks()}
+        onReadWorkbook={readWorkbookAction}
+      />
     </>
   );
 }

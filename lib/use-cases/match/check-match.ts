@@ -96,9 +96,7 @@ function makeSide(team: TeamView, players: readonly Player[], division: Division
         trouble: troubles.some((finding) => finding.row === row),
       }))
       .sort((a, b) => orderOf(a.number) - orderOf(b.number) || b.number.length - a.number.length),
-    troubles: mayName
-      ? [...new Set(troubles.map((finding) => finding.message))]
-      : countTroubles(troubles.length),
+    troubles: mayName ? sayTroubles(troubles, players) : countTroubles(troubles.length),
   };
 }
 export type MatchSide = ReturnType<typeof makeSide>;

@@ -45,3 +45,11 @@ export function listenForErrors(page: Page): string[] {
   });
   return errors;
 }
+
+/** The page is not there for this person: the same words, or the same status, as for one that does not exist. */
+export async function expectNothingThere(page: Page, path: string): Promise<void> {
+  const response = await page.goto(path);
+  if (response?.status() === 404) return;
+  // Inside a league that the person belongs to, the frame is sent before the page is known to be none of theirs.
+  await expect(page.getByText('There is no such page in this league')).toBeVisible();
+}

@@ -1,6 +1,10 @@
 import { decodeText } from '@/lib/domain/roster/import/decode-text';
-import { fileLimits, refuseRowCount, refuseSize } from '@/lib/domain/roster/import/limits';
+import { refuseSize } from '@/lib/domain/roster/import/limits';
 import { parseTable } from '@/lib/domain/roster/import/parse-table';
+import type { ActionResult } from '@/lib/web/action-result';
+
+type WorkbookRows = { rows: string[][]; sheet: string };
+export type ReadWorkbook = (form: FormData) => Promise<ActionResult<WorkbookRows>>;
 
 /** Rows of cells read from what a visitor brought, with where they came from, or the sentence that says why not. */
 export type Reading = { ok: true; rows: string[][]; from: string } | { ok: false; message: string };
@@ -13,11 +17,11 @@ export function readPaste(text: string): Reading {
     : { ok: false, message: parsed.message };
 }
 
-/** Reads a CSV, TSV or XLSX file in the browser; the file itself is never sent. */
-export async function readFile(file: File): Promise<Reading> {
+/** Reads a file: delimited text in the browser, a workbook on the server, which judges it before it is unpacked. */
+export async function readFile(file: File, onReadWorkbook: ReadWorkbook): Promise<Reading> {
   const tooLarge = refuseSize(file.size);
   if (tooLarge) return { ok: false, message: tooLarge.message };
-  if (file.name.toLowerCase().endsWith('.xlsx')) return readWorkbook(file);
+  if (file.name.toLowerCase().endsWith('.xlsx')) return readOnServer(file, onReadWorkbook);
   const decoded = decodeText(new Uint8Array(await file.arrayBuffer()));
   if (!decoded.ok) return { ok: false, message: decoded.message };
   const parsed = parseTable(decoded.text);
@@ -25,29 +29,10 @@ export async function readFile(file: File): Promise<Reading> {
   return { ok: true, rows: parsed.table.rows, from: `${file.name}, read as ${decoded.encoding}` };
 }
 
-async function readWorkbook(file: File): Promise<Reading> {
-  try {
-    // Only those who bring a workbook load its reader.
-    const { readSheet } = await import('read-excel-file/browser');
-    const cells = await readSheet(file);
-    const tooMany = refuseRowCount(cells.length);
-    if (tooMany) return { ok: false, message: tooMany.message };
-    return {
-      ok: true,
-      rows: cells.map((row) => row.slice(0, fileLimits.columns).map(writeCell)),
-      from: `${file.name}, first sheet`,
-    };
-  } catch {
-    return {
-      ok: false,
-      message: `${file.name} could not be opened as a workbook. If it has a password, remove it; else save the list as CSV and bring that.`,
-    };
-  }
+async function readOnServer(file: File, onReadWorkbook: ReadWorkbook): Promise<Reading> {
+  const form = new FormData();
+  form.set('file', file);
+  const answer = await onReadWorkbook(form);
+  if (!answer.ok) return { ok: false, message: answer.error.message };
+  return { ok: true, rows: answer.data.rows, from: `${file.name}, sheet ${answer.data.sheet}` };
 }
-
-const writeCell = (cell: unknown): string =>
-  cell === null || cell === undefined
-    ? ''
-    : cell instanceof Date
-      ? cell.toISOString().slice(0, 10)
-      : String(cell as string | number | boolean);

@@ -15,7 +15,7 @@ import type { CheckSummary, Finding } from '@/lib/domain/rules/finding';
 import { countOf } from '@/lib/domain/text/count-of';
 import { CheckResult } from './check-result';
 import type { Checked, CheckPreset } from './checked';
-import { readFile, readPaste, type Reading } from './read-file';
+import { readFile, readPaste, type Reading, type ReadWorkbook } from './read-file';
 
 const sample = `Player\tNumber\tName on back
 Adisa, Wren\t4\tADISA
@@ -28,7 +28,15 @@ Grantley, Osei\t#33\tGRANTLEY
 Hollin, Mara\t00\tHOLLIN`;
 
 /** Takes a list and a code, asks the public API what it finds, and shows it beside each player. */
-export function RosterCheckForm({ presets, checkUrl }: { presets: CheckPreset[]; checkUrl: string }) {
+export function RosterCheckForm({
+  presets,
+  checkUrl,
+  onReadWorkbook,
+}: {
+  presets: CheckPreset[];
+  checkUrl: string;
+  onReadWorkbook: ReadWorkbook;
+}) {
   const [presetId, setPresetId] = useState(
     presets.find((preset) => preset.id === 'basketball-nfhs')?.id ?? presets[0]?.id ?? '',
   );
@@ -44,7 +52,11 @@ export function RosterCheckForm({ presets, checkUrl }: { presets: CheckPreset[];
     setPending(true);
     setFailure(undefined);
     try {
-      const outcome = await checkList(checkUrl, preset, picked ? await readFile(picked) : readPaste(list));
+      const outcome = await checkList(
+        checkUrl,
+        preset,
+        picked ? await readFile(picked, onReadWorkbook) : readPaste(list),
+      );
       if ('failure' in outcome) setFailure(outcome.failure);
       else setChecked(outcome);
     } catch {
@@ -83,7 +95,7 @@ export function RosterCheckForm({ presets, checkUrl }: { presets: CheckPreset[];
               label="Or drop a file here, or pick one"
               accepts={['.csv', '.tsv', '.txt', '.xlsx']}
               maxBytes={fileLimits.bytes}
-              hint="At most 5 MB and 2,000 rows. It is read in your browser."
+              hint="At most 5 MB and 2,000 rows. A workbook is read on our server and forgotten; anything else in your browser."
               file={file}
               onFile={setFile}
             />
@@ -98,8 +110,7 @@ export function RosterCheckForm({ presets, checkUrl }: { presets: CheckPreset[];
                   value={presetId}
                   options={presets.map((entry) => ({
                     value: entry.id,
-                    label: entry.title,
-                    group: entry.sport,
+                    label: `${capitalise(entry.sport)}: ${entry.title}`,
                   }))}
                   onChange={(event) => setPresetId(event.target.value)}
                 />
