@@ -1,8 +1,5 @@
-import { randomUUID } from 'node:crypto';
 import pg from 'pg';
-import { inject } from 'vitest';
 import type { DatabaseUrls } from '../../scripts/database.mjs';
-import { copyTemplate } from '../../scripts/test-cluster.mjs';
 
 const read = (name: string): string => {
   const value = process.env[name];
@@ -17,10 +14,6 @@ export const getTestUrls = (): DatabaseUrls => ({
   ownerUrl: read('RAGLAN_OWNER_URL'),
   adminUrl: read('RAGLAN_TEST_ADMIN_URL'),
 });
-
-/** One more fresh, migrated, empty database beside this file's own. */
-export const createFreshDatabase = (): Promise<DatabaseUrls> =>
-  copyTemplate(inject('cluster'), `test_${randomUUID().replaceAll('-', '')}`);
 
 /** Runs one statement on a connection of its own and answers the rows. */
 export async function queryAt<Row extends pg.QueryResultRow>(
@@ -42,9 +35,3 @@ export const queryAsAdmin = <Row extends pg.QueryResultRow>(
   text: string,
   values: unknown[] = [],
 ): Promise<Row[]> => queryAt<Row>(getTestUrls().adminUrl, text, values);
-
-/** Asks this file's database as the runtime role, with no league set. */
-export const queryAsApp = <Row extends pg.QueryResultRow>(
-  text: string,
-  values: unknown[] = [],
-): Promise<Row[]> => queryAt<Row>(getTestUrls().appUrl, text, values);
