@@ -1,4 +1,3 @@
-import { type RosterLine } from '../../roster/player';
 import { countGraphemes } from '../../text/graphemes';
 import { isLatinText, keepLatin, listNonLatin } from '../../text/latin-letters';
 import { foldText, tidyText } from '../../text/normalise-text';
@@ -20,6 +19,7 @@ export const checkNamesOnBack: Check = (context, findings) => {
   if (severity === 'off') return;
   const backs = players.map((player) => tidyText(player.nameOnBack));
   const sharers = names.sharedSurnameNeedsInitial ? groupRows(backs) : new Map<string, number[]>();
+  const apart = listApartForms(context, sharers);
   const fits = (row: number) => (form: string) =>
     form !== '' && obeysForm(names, form) && isAlone(sharers, row, form);
   backs.forEach((back, row) => {
@@ -38,7 +38,7 @@ export const checkNamesOnBack: Check = (context, findings) => {
     }
     checkForm(names, back, add);
     const rows = sharers.get(foldText(back)) ?? [];
-    if (rows.length > 1) addShared(context, row, rows, back, names, add);
+    if (rows.length > 1) checkShared(context, row, rows, apart.get(row) ?? [], add);
   });
 };
 
@@ -61,30 +61,44 @@ function checkForm(names: NameRules, back: string, add: Add): void {
   }
 }
 
-function addShared(
+/** For every row whose name on the back others wear too: ways to write it with an initial that none of them shares. */
+function listApartForms(
+  context: RosterContext,
+  sharers: ReadonlyMap<string, number[]>,
+): Map<number, string[]> {
+  const apart = new Map<number, string[]>();
+  for (const rows of sharers.values()) {
+    if (rows.length < 2) continue;
+    const forms = rows.map((row) => {
+      const player = context.players[row];
+      const { given, surname } = splitPersonName(player?.name ?? '');
+      return listInitialForms(player?.nameOnBack ?? '', given, surname);
+    });
+    const counts = new Map<string, number>();
+    for (const form of forms.flat()) counts.set(foldText(form), (counts.get(foldText(form)) ?? 0) + 1);
+    rows.forEach((row, at) => {
+      apart.set(row, forms[at]?.filter((form) => counts.get(foldText(form)) === 1) ?? []);
+    });
+  }
+  return apart;
+}
+
+function checkShared(
   context: RosterContext,
   row: number,
   rows: readonly number[],
-  back: string,
-  names: NameRules,
+  apart: string[],
   add: Add,
 ): void {
-  const { players } = context;
-  const { given, surname } = splitPersonName(players[row]?.name ?? '');
-  const others = rows.filter((other) => other !== row);
-  const theirInitials = others.map((other) => initialForms(players[other], back));
-  const own = listInitialForms(back, given, surname);
-  const apart = own.filter((form, i) =>
-    theirInitials.every((forms) => forms[i] === undefined || foldText(forms[i]) !== foldText(form)),
+  const { mostLetters } = context.rules.ruleSet.names;
+  const back = tidyText(context.players[row]?.nameOnBack ?? '');
+  const others = nameRows(
+    context,
+    rows.filter((other) => other !== row),
   );
-  const shorter = apart.slice(0, 1).flatMap((form) => shortenAfterInitial(form, names.mostLetters));
-  const message = `${quoteText(back)} is also on ${nameRows(context, others, "'s")} back. Each needs an initial.`;
+  const shorter = apart.slice(0, 1).flatMap((form) => shortenAfterInitial(form, mostLetters));
+  const message = `${quoteText(back)} is also worn by ${others}. Each needs an initial.`;
   add('surname-needs-initial', message, [...apart, ...shorter]);
-}
-
-function initialForms(player: RosterLine | undefined, back: string): string[] {
-  const { given, surname } = splitPersonName(player?.name ?? '');
-  return listInitialForms(back, given, surname);
 }
 
 /** "A BROOKHOLLOW" with its surname cut to fit; the initial stays, because it tells the two apart. */
@@ -117,7 +131,9 @@ function groupRows(backs: readonly string[]): Map<string, number[]> {
   backs.forEach((back, row) => {
     if (back === '') return;
     const key = foldText(back);
-    rows.set(key, [...(rows.get(key) ?? []), row]);
+    const known = rows.get(key);
+    if (known === undefined) rows.set(key, [row]);
+    else known.push(row);
   });
   return rows;
 }
