@@ -1,4 +1,6 @@
-const plain = /^[\x21-\x7e]+(?: [\x21-\x7e]+)*$/;
+const ascii = /^[\x21-\x7e]+(?: [\x21-\x7e]+)*$/;
+/** ASCII and the ready-made Latin letters: composed already, nothing invisible among them. */
+const plain = /^[\x21-\x7e\u00c0-\u02af]+(?: [\x21-\x7e\u00c0-\u02af]+)*$/;
 
 /**
  * Text as a person would read it: composed (NFC), without invisible format characters (direction marks, zero-width
@@ -19,4 +21,4 @@ export function tidyText(text: string): string {
  * ones) and in lower case, independent of any locale.
  */
 export const foldText = (text: string): string =>
-  plain.test(text) ? text.toLowerCase() : tidyText(tidyText(text).normalize('NFKC').toLowerCase());
+  ascii.test(text) ? text.toLowerCase() : tidyText(tidyText(text).normalize('NFKC').toLowerCase());
