@@ -20,6 +20,7 @@ export const paths = {
     `/${league}/${season}/divisions/${division}`,
   teams: (league: string, season: string) => `/${league}/${season}/teams`,
   importTeams: (league: string, season: string) => `/${league}/${season}/teams/import`,
+  newTeam: (league: string, season: string) => `/${league}/${season}/teams/new`,
   team: (league: string, season: string, team: string) => `/${league}/${season}/teams/${team}`,
   rosters: (league: string, season: string) => `/${league}/${season}/rosters`,
   roster: (league: string, season: string, team: string) => `/${league}/${season}/rosters/${team}`,
@@ -45,6 +46,7 @@ export const paths = {
     ruleCatalogue: () => '/api/v1/rule-catalogue',
     openapi: () => '/api/v1/openapi.json',
     roster: (league: string, rosterId: string) => `/api/v1/leagues/${league}/rosters/${rosterId}`,
+    teamsCsv: (league: string, season: string) => `/api/v1/leagues/${league}/seasons/${season}/teams.csv`,
     rosterCsv: (league: string, rosterId: string) => `/api/v1/leagues/${league}/rosters/${rosterId}/csv`,
     rosterFile: (league: string, rosterId: string) =>
       `/api/v1/leagues/${league}/rosters/${rosterId}/read-file`,

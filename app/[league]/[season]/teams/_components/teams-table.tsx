@@ -1,0 +1,233 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { useMemo, useState } from 'react';
+import { RosterStateTag } from '@/components/status/roster-state-tag';
+import { Button, ButtonLink } from '@/components/ui/button';
+import { Card } from '@/components/ui/card';
+import { ConfirmDialog } from '@/components/ui/confirm-dialog';
+import { DataTable, type DataColumn } from '@/components/ui/data-table';
+import { EmptyState } from '@/components/ui/empty-state';
+import { FilterChips } from '@/components/ui/filter-chips';
+import { TextLink } from '@/components/ui/text-link';
+import { useToast } from '@/components/ui/toast';
+import { YokeTile } from '@/components/yoke-tile/yoke-tile';
+import { countOf } from '@/lib/domain/text/count-of';
+import type { ListedTeam, TeamList } from '@/lib/use-cases/teams/list-teams';
+import type { ActionResult } from '@/lib/web/action-result';
+import { paths } from '@/lib/web/paths';
+
+type Remove = (
+  league: string,
+  input: { teamId: string },
+) => Promise<ActionResult<{ name: string; players: number }>>;
+
+/** Every team with its kits: find, filter by division, sort, open, remove. */
+export function TeamsTable({
+  league,
+  season,
+  list,
+  onRemove,
+}: {
+  league: string;
+  season: string;
+  list: TeamList;
+  onRemove: Remove;
+}) {
+  const router = useRouter();
+  const showToast = useToast();
+  const [division, setDivision] = useState('all');
+  const [going, setGoing] = useState<ListedTeam | null>(null);
+  const { teams, mayChange, divisions } = list;
+  const shown = useMemo(
+    () => teams.filter((team) => division === 'all' || team.divisionId === division),
+    [teams, division],
+  );
+  const columns = useMemo(() => makeColumns(league, season, mayChange), [league, season, mayChange]);
+
+  const remove = async () => {
+    if (!going) return;
+    const answer = await onRemove(league, { teamId: going.id });
+    if (!answer.ok) return answer.error.message;
+    showToast({
+      tone: 'set',
+      title: `${answer.data.name} is removed with ${countOf(answer.data.players, 'player')}`,
+    });
+    setGoing(null);
+    router.refresh();
+  };
+
+  return (
+    <Card flush>
+      <DataTable
+        caption="Teams of the season"
+        rows={shown}
+        columns={columns}
+        getRowId={(team) => team.id}
+        searchLabel="Find a team"
+        {...(division !== 'all' && { onClearFilters: () => setDivision('all') })}
+        onOpenRow={(team) =>
+          router.push(
+            mayChange ? paths.team(league, season, team.slug) : paths.roster(league, season, team.slug),
+          )
+        }
+        toolbar={
+          <FilterChips
+            label="Which division"
+            chosen={division}
+            onChoose={setDivision}
+            chips={[
+              { id: 'all', label: 'All', count: teams.length },
+              ...divisions.map(({ id, name }) => ({
+                id,
+                label: name,
+                count: teams.filter((team) => team.divisionId === id).length,
+              })),
+            ]}
+          />
+        }
+        {...(mayChange && {
+          rowActions: (team: ListedTeam) => (
+            <span className="flex justify-end gap-1">
+              <ButtonLink
+                size="sm"
+                look="quiet"
+                href={paths.team(league, season, team.slug)}
+                aria-label={`Edit ${team.name}`}
+              >
+                Edit
+              </ButtonLink>
+              <Button
+                size="sm"
+                look="quiet"
+                onClick={() => setGoing(team)}
+                aria-label={`Remove ${team.name}`}
+              >
+                Remove
+              </Button>
+            </span>
+          ),
+        })}
+        empty={
+          <EmptyState
+            title="No teams yet"
+            action={
+              mayChange &&
+              (divisions.length === 0 ? (
+                <ButtonLink look="primary" href={paths.newDivision(league, season)}>
+                  Add a division first
+                </ButtonLink>
+              ) : (
+                <>
+                  <ButtonLink look="primary" href={paths.importTeams(league, season)}>
+                    Import teams
+                  </ButtonLink>
+                  <ButtonLink href={paths.newTeam(league, season)}>Add a team</ButtonLink>
+                </>
+              ))
+            }
+          >
+            {mayChange
+              ? 'Bring in a list with names, divisions and colours, or add them one by one.'
+              : 'Ask a league admin to name you for your team.'}
+          </EmptyState>
+        }
+      />
+      <ConfirmDialog
+        open={going !== null}
+        onOpenChange={(open) => {
+          if (!open) setGoing(null);
+        }}
+        title={`Remove ${going?.name ?? 'the team'}?`}
+        confirm={`Remove ${going?.name ?? 'it'}`}
+        onConfirm={remove}
+      >
+        {going?.players === 0
+          ? 'Its colours are lost. It has no players.'
+          : `Its roster of ${countOf(going?.players ?? 0, 'player')} and its colours are lost for good.`}
+      </ConfirmDialog>
+    </Card>
+  );
+}
+
+function makeColumns(league: string, season: string, mayChange: boolean): DataColumn<ListedTeam>[] {
+  return [
+    {
+      id: 'team',
+      header: 'Team',
+      rowHead: true,
+      cell: (team) => (
+        <TextLink
+          href={mayChange ? paths.team(league, season, team.slug) : paths.roster(league, season, team.slug)}
+          className="text-ink! break-words no-underline! hover:underline!"
+        >
+          {team.name}
+        </TextLink>
+      ),
+      sortValue: (team) => team.name,
+      searchText: (team) => team.name,
+    },
+    {
+      id: 'home',
+      header: 'Home',
+      cell: (team) => (
+        <span className="flex items-center gap-2">
+          <YokeTile kit={team.kits.home} number="12" />
+          <span className="text-dusk">{team.kits.home.name}</span>
+        </span>
+      ),
+      sortValue: (team) => team.kits.home.name,
+      searchText: (team) => team.kits.home.name,
+    },
+    {
+      id: 'away',
+      header: 'Away',
+      cell: (team) =>
+        team.kits.away ? (
+          <span className="flex items-center gap-2">
+            <YokeTile kit={team.kits.away} number="12" />
+            <span className="text-dusk">{team.kits.away.name}</span>
+          </span>
+        ) : (
+          <span className="text-dusk">none</span>
+        ),
+      sortValue: (team) => team.kits.away?.name ?? null,
+    },
+    {
+      id: 'division',
+      header: 'Division',
+      cell: (team) => <span className="text-dusk">{team.division}</span>,
+      sortValue: (team) => team.division,
+      searchText: (team) => team.division,
+    },
+    {
+      id: 'players',
+      header: 'Players',
+      end: true,
+      cell: (team) => team.players,
+      sortValue: (team) => team.players,
+    },
+    {
+      id: 'roster',
+      header: 'Roster',
+      cell: (team) => (
+        <TextLink
+          href={paths.roster(league, season, team.slug)}
+          className="no-underline!"
+          aria-label={`Roster of ${team.name}, ${team.state}`}
+        >
+          <RosterStateTag state={team.state} />
+        </TextLink>
+      ),
+      sortValue: (team) => team.state,
+      searchText: (team) => team.state,
+    },
+    {
+      id: 'managers',
+      header: 'Managers',
+      end: true,
+      cell: (team) => (team.managers === 0 ? <span className="text-care">none yet</span> : team.managers),
+      sortValue: (team) => team.managers,
+    },
+  ];
+}

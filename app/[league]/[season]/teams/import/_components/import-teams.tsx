@@ -1,0 +1,258 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { useMemo, useState } from 'react';
+import { FormFailure } from '@/app/_components/form-failure';
+import { useSubmit } from '@/app/_components/use-submit';
+import { Button } from '@/components/ui/button';
+import { Card } from '@/components/ui/card';
+import { Field, SelectField } from '@/components/ui/field';
+import { FileDrop } from '@/components/ui/file-drop';
+import { Notice } from '@/components/ui/notice';
+import { Textarea } from '@/components/ui/textarea';
+import { useToast } from '@/components/ui/toast';
+import type { Kit, TeamKits } from '@/lib/domain/kit/kit';
+import { teamFields } from '@/lib/domain/roster/import/heading-words';
+import { listHeadings } from '@/lib/domain/roster/import/find-headings';
+import { fileLimits } from '@/lib/domain/roster/import/limits';
+import { parseTable } from '@/lib/domain/roster/import/parse-table';
+import { readTeams } from '@/lib/domain/roster/import/read-teams';
+import { guessTeamMapping, type TeamColumn, type TeamMapping } from '@/lib/domain/roster/import/team-mapping';
+import { countOf } from '@/lib/domain/text/count-of';
+import type { ActionResult } from '@/lib/web/action-result';
+import { paths } from '@/lib/web/paths';
+import { planTeams } from './plan-teams';
+import { TeamPlanTable } from './team-plan-table';
+
+type Sheet = { name: string; rows: string[][]; notes: string[] };
+type Sent = {
+  season: string;
+  teams: { name: string; divisionId: string; home: Kit | null; away: Kit | null }[];
+  refused: number;
+};
+
+const columnWords: Record<TeamColumn, string> = {
+  team: 'Team',
+  division: 'Division',
+  homeColour: 'Home colour',
+  homeNumber: 'Home number colour',
+  awayColour: 'Away colour',
+  awayNumber: 'Away number colour',
+  manager: 'Manager’s e-mail (invite on the People page)',
+  extra: 'Nothing we know',
+  'leave out': 'Leave it out',
+};
+
+/** From a file or a paste to teams: read, match the columns, see what would happen, then do it in one step. */
+export function ImportTeams({
+  league,
+  season,
+  divisions,
+  known,
+  onRead,
+  onImport,
+}: {
+  league: string;
+  season: string;
+  divisions: { id: string; name: string }[];
+  known: { name: string; divisionId: string; kits: TeamKits }[];
+  onRead: (
+    league: string,
+    form: FormData,
+  ) => Promise<ActionResult<{ ok: true; tables: Sheet[] } | { ok: false; message: string }>>;
+  onImport: (
+    league: string,
+    input: Sent,
+  ) => Promise<ActionResult<{ added: number; changed: number; unchanged: number }>>;
+}) {
+  const router = useRouter();
+  const showToast = useToast();
+  const [file, setFile] = useState<File | null>(null);
+  const [text, setText] = useState('');
+  const [sheets, setSheets] = useState<Sheet[]>([]);
+  const [sheet, setSheet] = useState(0);
+  const [mapping, setMapping] = useState<TeamMapping | null>(null);
+  const [refusal, setRefusal] = useState<string>();
+  const [reading, setReading] = useState(false);
+
+  const take = (found: Sheet[]) => {
+    setSheets(found);
+    setSheet(0);
+    setMapping(guessTeamMapping(found[0]?.rows ?? []));
+    setRefusal(undefined);
+  };
+  const readPaste = () => {
+    const parsed = parseTable(text);
+    if (!parsed.ok) return setRefusal(parsed.message);
+    take([{ name: 'your paste', rows: parsed.table.rows, notes: parsed.table.notes }]);
+  };
+  const readFile = async (picked: File | null) => {
+    setFile(picked);
+    if (!picked) return;
+    setReading(true);
+    const form = new FormData();
+    form.set('file', picked);
+    try {
+      const answer = await onRead(league, form);
+      if (!answer.ok) setRefusal(answer.error.message);
+      else if (!answer.data.ok) setRefusal(answer.data.message);
+      else take(answer.data.tables);
+    } catch {
+      setRefusal('The file did not reach the server. It is still chosen; try again.');
+    }
+    setReading(false);
+  };
+
+  const rows = sheets[sheet]?.rows;
+  const plan = useMemo(() => {
+    if (!rows || !mapping) return null;
+    const taken = readTeams(rows, mapping, divisions);
+    return { reading: taken, teams: planTeams(taken.lines, known) };
+  }, [rows, mapping, divisions, known]);
+  const toSend = plan?.teams.filter((team) => team.fate !== 'twice') ?? [];
+  const count = (fate: string) => plan?.teams.filter((team) => team.fate === fate).length ?? 0;
+  const refused = (plan?.reading.refused.length ?? 0) + count('twice');
+
+  const { submit, pending, failure } = useSubmit(
+    () =>
+      onImport(league, {
+        season,
+        refused,
+        teams: toSend.map(({ name, divisionId, home, away }) => ({ name, divisionId, home, away })),
+      }),
+    ({ added, changed }) => {
+      showToast({ tone: 'set', title: `${countOf(added, 'team')} added, ${changed} changed` });
+      router.push(paths.teams(league, season));
+      router.refresh();
+    },
+  );
+
+  return (
+    <div className="grid gap-5">
+      {divisions.length === 0 && (
+        <Notice tone="care" title="No divisions yet">
+          Every team belongs to a division. Add the divisions first, then bring in the teams.
+        </Notice>
+      )}
+      <Card
+        title="The list"
+        aside={
+          <a href="/samples/team-list.csv" download className="text-damson underline underline-offset-3">
+            A sample list
+          </a>
+        }
+      >
+        <div className="grid gap-4 lg:grid-cols-2">
+          <FileDrop
+            label={reading ? 'Reading the file' : 'Drop a list here, or pick a file'}
+            accepts={['.csv', '.tsv', '.txt', '.xlsx']}
+            maxBytes={fileLimits.bytes}
+            hint="CSV or XLSX, at most 5 MB."
+            file={file}
+            onFile={(picked) => void readFile(picked)}
+          />
+          <div className="grid content-start gap-2">
+            <Field label="Or paste cells from a spreadsheet">
+              {(wiring) => (
+                <Textarea
+                  {...wiring}
+                  rows={4}
+                  className="font-mono"
+                  value={text}
+                  onChange={(event) => setText(event.target.value)}
+                />
+              )}
+            </Field>
+            <div>
+              <Button
+                size="sm"
+                onClick={readPaste}
+                unavailable={text.trim() === '' ? 'Paste the cells first.' : undefined}
+              >
+                Read the paste
+              </Button>
+            </div>
+          </div>
+        </div>
+        {refusal !== undefined && (
+          <div className="mt-4">
+            <Notice tone="stop" live="assertive">
+              {refusal}
+            </Notice>
+          </div>
+        )}
+      </Card>
+      {rows && mapping && plan && (
+        <>
+          <Card title="Columns" aside={sheets[sheet]?.name}>
+            {sheets.length > 1 && (
+              <SelectField
+                label="Sheet"
+                className="mb-4 sm:max-w-80"
+                options={sheets.map((entry, index) => ({ value: String(index), label: entry.name }))}
+                value={String(sheet)}
+                onChange={(event) => {
+                  const next = Number(event.target.value);
+                  setSheet(next);
+                  setMapping(guessTeamMapping(sheets[next]?.rows ?? []));
+                }}
+              />
+            )}
+            <div className="grid gap-3 sm:grid-cols-2 lg:grid-cols-4">
+              {listHeadings(rows, mapping.headerRow).headings.map((heading, column) => (
+                <SelectField
+                  key={column}
+                  label={heading}
+                  options={([...teamFields, 'extra', 'leave out'] as TeamColumn[]).map((value) => ({
+                    value,
+                    label: columnWords[value],
+                  }))}
+                  value={mapping.columns[column] ?? 'extra'}
+                  onChange={(event) => {
+                    const chosen = event.target.value as TeamColumn;
+                    setMapping({
+                      ...mapping,
+                      // A thing stands in one column; choosing it here lets the other one go.
+                      columns: mapping.columns.map((entry, at) =>
+                        at === column
+                          ? chosen
+                          : entry === chosen && chosen !== 'extra' && chosen !== 'leave out'
+                            ? 'extra'
+                            : entry,
+                      ),
+                    });
+                  }}
+                />
+              ))}
+            </div>
+            {plan.reading.notes.length > 0 && (
+              <ul className="text-dusk type-small mt-3 list-disc pl-5">
+                {plan.reading.notes.map((note) => (
+                  <li key={note}>{note}</li>
+                ))}
+              </ul>
+            )}
+          </Card>
+          <TeamPlanTable teams={plan.teams} refused={plan.reading.refused} divisions={divisions} />
+          <FormFailure failure={failure} />
+          <div className="flex flex-wrap items-center gap-4">
+            <Button
+              look="primary"
+              pending={pending}
+              onClick={() => void submit()}
+              unavailable={
+                count('added') + count('changed') === 0 ? 'There is nothing to add or change.' : undefined
+              }
+            >
+              Import {countOf(count('added') + count('changed'), 'team')}
+            </Button>
+            <p className="text-dusk">
+              {count('added')} new, {count('changed')} changed, {count('unchanged')} as they are, {refused}{' '}
+              left out.
+            </p>
+          </div>
+        </>
+      )}
+    </div>
+  );
+}
