@@ -25,6 +25,7 @@ const groups: Record<string, string> = {
 /** Where a size stands among its like: "YM", "youth medium", "XXL", "2XL", "Adult S", "32"; null when unknown. */
 export function rankSize(text: string): SizeRank | null {
   const words = foldText(text)
+    .replace(/['’]/g, '')
     .replace(/[^a-z0-9]+/g, ' ')
     .trim();
   const number = /^([0-9]{1,3})(?: ([0-9]{1,3}))?$/.exec(words);
