@@ -80,5 +80,3 @@ export function planPaste(given: {
   }
   return { edits, problems };
 }
-
-const count1 = (count: number, noun: string): string => `${count} ${count === 1 ? noun : `${noun}s`}`;
