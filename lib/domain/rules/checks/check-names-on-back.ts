@@ -29,7 +29,8 @@ export const checkNamesOnBack: Check = (context, findings) => {
     };
     const name = players[row]?.name ?? '';
     if (back === '') {
-      if (names.onBack === 'wanted') add('name-on-back-missing', missing(name), wornForms(names, name));
+      if (names.onBack === 'wanted')
+        add('name-on-back-missing', missing(name), listWornForms(names, name, fits(row)));
       return;
     }
     if (names.onBack === 'not allowed') {
@@ -113,10 +114,12 @@ const missing = (name: string): string =>
     ? 'A name on the back is wanted.'
     : `A name on the back is wanted for ${tidyText(name)}.`;
 
-/** The surname in capitals and shorter forms of it: what most teams print. Common practice, no source. */
-function wornForms(names: NameRules, name: string): string[] {
-  const surname = repairLetters(names, splitPersonName(name).surname).toUpperCase();
-  return [surname, ...listShorterNames(surname, names.mostLetters)];
+/** The surname in capitals, which most teams print (common practice, no source), or else what comes nearest to it. */
+function listWornForms(names: NameRules, name: string, fits: (form: string) => boolean): string[] {
+  const { given, surname } = splitPersonName(name);
+  const back = repairLetters(names, surname).toUpperCase();
+  if (fits(back)) return [back];
+  return [...listInitialForms(back, given, back), ...listShorterNames(back, names.mostLetters)];
 }
 
 const repairLetters = (names: NameRules, text: string): string =>

@@ -3,8 +3,8 @@ import { foldText } from '../../text/normalise-text';
 import { type RosterContext } from './roster-context';
 
 const mostSuggestions = 3;
-/** What a suggestion is near to when there is no number: players rarely wish for 0. Common practice, no source. */
-const startAt = 1;
+/** Without a number to be near to, offers count up from 1: players rarely wish for 0. Common practice, no source. */
+const belowOne = 0.5;
 
 /**
  * Whether a label would leave this row without any number finding: allowed, not worn by another row, kept for no
@@ -28,12 +28,12 @@ const isWornByOther = (context: RosterContext, row: number, key: string): boolea
   (context.rowsByKey.get(key) ?? []).some((other) => other !== row);
 
 /**
- * Up to three labels that are free for a row, nearest by value to `near` (null: to 1), the lower first when two are
- * as near, and only one of labels that count as the same.
+ * Up to three labels that are free for a row, nearest by value to `near`, the lower first when two are as near, and only
+ * one of labels that count as the same. With `near` null the lowest from 1 up, then 0 and 00.
  */
 export function suggestFreeLabels(context: RosterContext, row: number, near: string | null): string[] {
   const { labels, ruleSet } = context.rules;
-  const target = near === null ? startAt : Number(near);
+  const target = near === null ? belowOne : Number(near);
   const found: string[] = [];
   const keys = new Set<string>();
   let below = labels.length - 1;
@@ -42,8 +42,8 @@ export function suggestFreeLabels(context: RosterContext, row: number, near: str
   while (found.length < mostSuggestions && (below >= 0 || above < labels.length)) {
     const low = labels[below];
     const high = labels[above];
-    const takeLow =
-      low !== undefined && (high === undefined || target - Number(low) <= Number(high) - target);
+    const nearer = near !== null && target - Number(low) <= Number(high) - target;
+    const takeLow = low !== undefined && (high === undefined || nearer);
     const label = takeLow ? low : high;
     if (takeLow) below -= 1;
     else above += 1;
