@@ -1,0 +1,134 @@
+'use client';
+
+import { useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { Card } from '@/components/ui/card';
+import { Field, SelectField } from '@/components/ui/field';
+import { FileDrop } from '@/components/ui/file-drop';
+import { Notice } from '@/components/ui/notice';
+import { Textarea } from '@/components/ui/textarea';
+import { encodingChoices, type EncodingLabel } from '@/lib/domain/roster/import/decode-text';
+import { fileLimits } from '@/lib/domain/roster/import/limits';
+import { sampleFiles } from '@/lib/domain/roster/import/samples';
+import { bringFile, bringPaste, bringText, type Brought, type Source } from './source';
+
+/** Where the list comes from: a file dropped or picked, or cells pasted; and how its letters were read. */
+export function SourceCard({
+  readUrl,
+  source,
+  onSource,
+}: {
+  readUrl: string;
+  source: Source | null;
+  onSource: (source: Source) => void;
+}) {
+  const [file, setFile] = useState<File | null>(null);
+  const [text, setText] = useState('');
+  const [refusal, setRefusal] = useState<string>();
+  const [busy, setBusy] = useState(false);
+  const take = (brought: Brought) => {
+    if (brought.ok) onSource(brought.source);
+    setRefusal(brought.ok ? undefined : brought.message);
+  };
+  const pick = async (picked: File | null) => {
+    setFile(picked);
+    setRefusal(undefined);
+    if (!picked) return;
+    setBusy(true);
+    try {
+      take(await bringFile(picked, readUrl));
+    } catch {
+      setRefusal(
+        'The file did not reach the server. It is still chosen: check the connection and pick it again.',
+      );
+    }
+    setBusy(false);
+  };
+  return (
+    <Card title="The list">
+      <div className="grid gap-4 lg:grid-cols-2">
+        <FileDrop
+          label={busy ? 'Reading the file' : 'Drop a list here, or pick a file'}
+          accepts={['.csv', '.tsv', '.txt', '.xlsx', '.xls', '.xlsm', '.ods', '.numbers', '.pdf']}
+          maxBytes={fileLimits.bytes}
+          hint="CSV or XLSX, at most 5 MB and 2,000 rows. Formulas are never worked out."
+          file={file}
+          onFile={(picked) => void pick(picked)}
+        />
+        <div className="grid content-start gap-2">
+          <Field label="Or paste cells from a spreadsheet">
+            {(wiring) => (
+              <Textarea
+                {...wiring}
+                rows={4}
+                spellCheck={false}
+                className="font-mono"
+                value={text}
+                onChange={(event) => setText(event.target.value)}
+              />
+            )}
+          </Field>
+          <div>
+            <Button
+              size="sm"
+              onClick={() => take(bringPaste(text))}
+              unavailable={text.trim() === '' ? 'Paste the cells first.' : undefined}
+            >
+              Read the paste
+            </Button>
+          </div>
+        </div>
+      </div>
+      {refusal !== undefined && (
+        <div className="mt-4">
+          <Notice tone="stop" live="assertive" title="This list cannot be read">
+            {refusal}
+          </Notice>
+        </div>
+      )}
+      {source?.text && (
+        <div className="mt-4 flex flex-wrap items-end gap-4">
+          <SelectField
+            label="Letters read as"
+            className="w-64"
+            placeholder={source.text.encoding}
+            options={encodingChoices.map((choice) => ({ value: choice.label, label: choice.name }))}
+            defaultValue=""
+            onChange={(event) => {
+              if (source.text)
+                take(
+                  bringText(source.from, source.text.bytes, (event.target.value as EncodingLabel) || null),
+                );
+            }}
+          />
+          {!source.text.sure && source.text.sample.length > 0 && (
+            <p className="text-care type-small pb-2">
+              Do these look right? <bdi className="font-mono">{source.text.sample.join(', ')}</bdi>
+            </p>
+          )}
+        </div>
+      )}
+      <details className="mt-4">
+        <summary className="text-damson touch inline-flex cursor-pointer items-center underline underline-offset-3">
+          Sample files to try
+        </summary>
+        <ul className="mt-2 grid gap-1.5">
+          {sampleFiles
+            .filter((sample) => sample.kind === 'roster')
+            .map((sample) => (
+              <li key={sample.file}>
+                <a
+                  href={`/samples/${sample.file}`}
+                  download
+                  className="text-damson underline underline-offset-3"
+                >
+                  {sample.title}
+                </a>
+                <span className="text-dusk">: {sample.says}</span>
+              </li>
+            ))}
+        </ul>
+      </details>
+    </Card>
+  );
+}

@@ -1,0 +1,74 @@
+import { decodeText, decodeTextAs, type EncodingLabel } from '@/lib/domain/roster/import/decode-text';
+import { refuseSize } from '@/lib/domain/roster/import/limits';
+import { parseTable } from '@/lib/domain/roster/import/parse-table';
+
+export type Sheet = { name: string; rows: string[][]; notes: string[] };
+
+/** A list as it was brought: its sheets, and for text the bytes with how they were read, so that it can be read anew. */
+export type Source = {
+  from: string;
+  sheets: Sheet[];
+  text: { bytes: Uint8Array; encoding: string; sure: boolean; sample: string[] } | null;
+};
+export type Brought = { ok: true; source: Source } | { ok: false; message: string };
+
+const noteProblems = (problems: readonly { rowNumber: number; message: string }[]): string[] =>
+  problems.map((problem) => `Row ${problem.rowNumber}: ${problem.message}`);
+
+/** Reads pasted cells. */
+export function bringPaste(text: string): Brought {
+  const parsed = parseTable(text);
+  if (!parsed.ok) return { ok: false, message: parsed.message };
+  const { rows, notes, problems } = parsed.table;
+  return {
+    ok: true,
+    source: {
+      from: 'your paste',
+      sheets: [{ name: 'paste', rows, notes: [...notes, ...noteProblems(problems)] }],
+      text: null,
+    },
+  };
+}
+
+/** Reads delimited text in the browser, in the encoding it seems to have or the one a person chose. */
+export function bringText(name: string, bytes: Uint8Array, chosen: EncodingLabel | null): Brought {
+  const decoded = chosen === null ? decodeText(bytes) : decodeTextAs(bytes, chosen);
+  if (!decoded.ok) return { ok: false, message: decoded.message };
+  const parsed = parseTable(decoded.text);
+  if (!parsed.ok) return { ok: false, message: parsed.message };
+  const { rows, notes, problems } = parsed.table;
+  const all = [...(decoded.note === undefined ? [] : [decoded.note]), ...notes, ...noteProblems(problems)];
+  return {
+    ok: true,
+    source: {
+      from: name,
+      sheets: [{ name, rows, notes: all }],
+      text: { bytes, encoding: decoded.encoding, sure: decoded.sure, sample: decoded.sample },
+    },
+  };
+}
+
+type ServerAnswer = { ok: true; tables: Sheet[]; notes: string[] } | { ok: false; message: string };
+
+/** Reads a file: text here, anything else on the server, which knows what it is and whether it may be unpacked. */
+export async function bringFile(file: File, readUrl: string): Promise<Brought> {
+  const tooLarge = refuseSize(file.size);
+  if (tooLarge) return { ok: false, message: tooLarge.message };
+  const bytes = new Uint8Array(await file.arrayBuffer());
+  if (/\.(csv|tsv|txt)$/i.test(file.name)) {
+    const here = bringText(file.name, bytes, null);
+    if (here.ok) return here;
+  }
+  const response = await fetch(`${readUrl}?name=${encodeURIComponent(file.name)}`, {
+    method: 'POST',
+    headers: { 'content-type': 'application/octet-stream' },
+    body: bytes,
+  });
+  const answer = (await response.json()) as ServerAnswer & { detail?: string };
+  if (!response.ok) return { ok: false, message: answer.detail ?? 'The file could not be read. Try again.' };
+  if (!answer.ok) return { ok: false, message: answer.message };
+  const sheets = answer.tables.map((table) => ({ ...table, notes: [...answer.notes, ...table.notes] }));
+  return sheets.length === 0
+    ? { ok: false, message: `${file.name} has no sheet with a list in it.` }
+    : { ok: true, source: { from: file.name, sheets, text: null } };
+}
