@@ -34,6 +34,24 @@ export async function lockSeason(tx: LeagueTx, seasonId: string): Promise<boolea
   return row !== undefined;
 }
 
+/**
+ * Locks the season of a division, before the division itself: whoever adds teams takes the two in this order, and the
+ * other way round they would wait for each other. Undefined when the league has no such division.
+ */
+export async function lockSeasonOfDivision(tx: LeagueTx, divisionId: string): Promise<string | undefined> {
+  const row = await tx
+    .selectFrom('seasons as s')
+    .innerJoin('divisions as d', (join) =>
+      join.onRef('d.league_id', '=', 's.league_id').onRef('d.season_id', '=', 's.id'),
+    )
+    .select('s.id')
+    .where('s.league_id', '=', tx.leagueId)
+    .where('d.id', '=', divisionId)
+    .forUpdate('s')
+    .executeTakeFirst();
+  return row?.id;
+}
+
 /** Adds a division after the others of its season. */
 export async function insertDivision(
   tx: LeagueTx,
@@ -80,6 +98,19 @@ export function lockDivision(tx: LeagueTx, divisionId: string) {
     .where('id', '=', divisionId)
     .forUpdate()
     .executeTakeFirst();
+}
+
+/** The divisions that these teams play in, by id. */
+export async function listDivisionIdsOfTeams(tx: LeagueTx, teamIds: readonly string[]): Promise<Set<string>> {
+  if (teamIds.length === 0) return new Set();
+  const rows = await tx
+    .selectFrom('teams')
+    .select('division_id')
+    .distinct()
+    .where('league_id', '=', tx.leagueId)
+    .where('id', 'in', [...teamIds])
+    .execute();
+  return new Set(rows.map((row) => row.division_id));
 }
 
 /** How many teams a division has. */

@@ -55,7 +55,7 @@ export function listDivisionsByRuleSet(tx: LeagueTx) {
     .innerJoin('seasons as s', (join) =>
       join.onRef('s.league_id', '=', 'd.league_id').onRef('s.id', '=', 'd.season_id'),
     )
-    .select(['d.rule_set_id as ruleSetId', 'd.name', 's.name as season', 's.id as seasonId'])
+    .select(['d.id', 'd.rule_set_id as ruleSetId', 'd.name', 's.name as season', 's.id as seasonId'])
     .where('d.league_id', '=', tx.leagueId)
     .orderBy('s.first_match_on', 'desc')
     .orderBy('d.position')

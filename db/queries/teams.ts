@@ -63,6 +63,24 @@ export async function updateTeam(
 }
 
 /**
+ * Locks the season of a team, before the team itself: an import takes the two in this order. Undefined when the league
+ * has no such team.
+ */
+export async function lockSeasonOfTeam(tx: LeagueTx, teamId: string): Promise<string | undefined> {
+  const row = await tx
+    .selectFrom('seasons as s')
+    .innerJoin('teams as t', (join) =>
+      join.onRef('t.league_id', '=', 's.league_id').onRef('t.season_id', '=', 's.id'),
+    )
+    .select('s.id')
+    .where('s.league_id', '=', tx.leagueId)
+    .where('t.id', '=', teamId)
+    .forUpdate('s')
+    .executeTakeFirst();
+  return row?.id;
+}
+
+/**
  * Locks a team and its roster and says what would go with them: how many players, and the batch that holds the roster.
  * Undefined when the league has no such team.
  */

@@ -51,6 +51,8 @@ export function describeEvent(event: AuditEvent): string {
     }
     case 'rule set drafted':
       return `drafted version ${event.data.version} of the number rules ${event.data.name}`;
+    case 'rule set draft discarded':
+      return `discarded the draft of version ${event.data.version} of the number rules ${event.data.name}`;
     case 'rule set put in force':
       return `put version ${event.data.version} of the number rules ${event.data.name} in force`;
     case 'roster edited':

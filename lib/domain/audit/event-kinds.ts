@@ -32,6 +32,7 @@ const kindOf: Record<AuditEvent['type'], EventKind> = {
   'teams imported': 'teams',
   'rule set started': 'number rules',
   'rule set drafted': 'number rules',
+  'rule set draft discarded': 'number rules',
   'rule set put in force': 'number rules',
   'roster edited': 'rosters',
   'roster imported': 'rosters',

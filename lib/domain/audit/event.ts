@@ -1,3 +1,5 @@
+import { writeCanonicalJson } from '../batch/canonical-json';
+
 /** A difference as it is kept in the history: the fields that changed, each with both values. */
 export type Difference = Record<string, { from: unknown; to: unknown }>;
 
@@ -34,6 +36,7 @@ export type AuditEvent =
       subjectId: string;
       data: { name: string; version: number; changes: Difference };
     }
+  | { type: 'rule set draft discarded'; subjectId: string; data: { name: string; version: number } }
   | { type: 'rule set put in force'; subjectId: string; data: { name: string; version: number } }
   | { type: 'roster edited'; subjectId: string; data: { team: string; changes: RosterChange[] } }
   | {
@@ -77,13 +80,17 @@ export type SystemEvent =
   | { type: 'password changed'; data: { how: 'reset' | 'settings' } }
   | { type: 'batches listed over leagues'; data: { batches: number } };
 
-/** The fields of `before` and `after` that differ, compared as JSON; null when nothing does. */
+/**
+ * The fields of `before` and `after` that differ, compared as JSON; null when nothing does. The order of keys counts for
+ * nothing, because the database keeps its own.
+ */
 export function listDifferences<T extends Record<string, unknown>>(before: T, after: T): Difference | null {
-  const changed = Object.keys(after).filter(
-    (key) => JSON.stringify(before[key]) !== JSON.stringify(after[key]),
-  );
+  const changed = Object.keys(after).filter((key) => writePlain(before[key]) !== writePlain(after[key]));
   if (changed.length === 0) return null;
   return Object.fromEntries(
     changed.map((key) => [key, { from: before[key] ?? null, to: after[key] ?? null }]),
   );
 }
+
+/** As canonical JSON, after JSON itself has made a date a text. */
+const writePlain = (value: unknown): string => writeCanonicalJson(JSON.parse(JSON.stringify(value ?? null)));

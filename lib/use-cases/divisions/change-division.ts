@@ -1,7 +1,7 @@
 import type { z } from 'zod';
 import { insertAuditEvent } from '@/db/queries/audit';
 import { listDivisionViews } from '@/db/queries/division-view';
-import { lockDivision, updateDivision } from '@/db/queries/divisions';
+import { lockSeasonOfDivision, updateDivision } from '@/db/queries/divisions';
 import { replaceGarments } from '@/db/queries/garments';
 import { withLeague } from '@/db/tenant';
 import { listDifferences } from '@/lib/domain/audit/event';
@@ -17,24 +17,24 @@ export async function changeDivision(
 ): Promise<{ rowVersion: number }> {
   assertCan(ctx.actor, 'division.write');
   return withLeague(ctx.league.id, async (tx) => {
-    const locked = await lockDivision(tx, input.divisionId);
-    if (!locked) throw notFound('division');
-    const before = (await listDivisionViews(tx, locked.seasonId)).find(
-      (division) => division.id === locked.id,
+    const seasonId = await lockSeasonOfDivision(tx, input.divisionId);
+    if (seasonId === undefined) throw notFound('division');
+    const before = (await listDivisionViews(tx, seasonId)).find(
+      (division) => division.id === input.divisionId,
     );
     if (!before) throw notFound('division');
     const { fields } = await readDivisionFields(tx, ctx, input.fields, {
-      seasonId: locked.seasonId,
-      ownId: locked.id,
+      seasonId,
+      ownId: before.id,
     });
-    if (!(await updateDivision(tx, { ...fields, id: locked.id, rowVersion: input.rowVersion }))) {
+    if (!(await updateDivision(tx, { ...fields, id: before.id, rowVersion: input.rowVersion }))) {
       throw new AppError(
         'conflict',
         'Somebody changed this division since you opened it. Your entries are kept here; reload to see theirs.',
       );
     }
-    await replaceGarments(tx, locked.id, input.fields.garments, ctx.newId);
-    await scheduleOwnFreeze(tx, { id: locked.id, seasonId: locked.seasonId, freezesAt: fields.freezesAt });
+    await replaceGarments(tx, before.id, input.fields.garments, ctx.newId);
+    await scheduleOwnFreeze(tx, { id: before.id, seasonId, freezesAt: fields.freezesAt });
     const { name, ageBand, level, ruleSetId, leastPlayers, mostPlayers, ownFreezesAt, garments } = before;
     const changes = listDifferences(
       { name, ageBand, level, ruleSetId, leastPlayers, mostPlayers, freezesAt: ownFreezesAt, garments },
@@ -44,7 +44,7 @@ export async function changeDivision(
       await insertAuditEvent(
         tx,
         { ...ctx, userId: ctx.actor.userId },
-        { type: 'division changed', subjectId: locked.id, data: { name: fields.name, changes } },
+        { type: 'division changed', subjectId: before.id, data: { name: fields.name, changes } },
       );
     }
     return { rowVersion: input.rowVersion + 1 };

@@ -6,15 +6,19 @@ import { withLeague } from '@/db/tenant';
 import { can } from '@/lib/domain/access/permissions';
 import { notFound } from '@/lib/platform/errors';
 import { assertCan, type ActorContext } from '../context';
+import { findVisibleDivisions } from '../visible-divisions';
 
-/** The divisions of a season in their order, with their teams and players counted. */
+/** The divisions of a season that the person may see, in their order, with their teams and players counted. */
 export async function listDivisions(ctx: ActorContext, input: { season: string }) {
   assertCan(ctx.actor, 'division.read');
   return withLeague(ctx.league.id, async (tx) => {
     const season = await findSeasonBySlug(tx, input.season);
     if (!season) throw notFound('season');
     const counts = await countByDivision(tx, season.id);
-    const divisions = await listDivisionViews(tx, season.id);
+    const visible = await findVisibleDivisions(tx, ctx, 'division.read');
+    const divisions = (await listDivisionViews(tx, season.id)).filter(
+      (division) => visible?.has(division.id) ?? true,
+    );
     return {
       season,
       mayChange: can(ctx.actor, 'division.write'),

@@ -1,5 +1,5 @@
 import { insertAuditEvent } from '@/db/queries/audit';
-import { countTeams, deleteDivision, lockDivision } from '@/db/queries/divisions';
+import { countTeams, deleteDivision, lockDivision, lockSeasonOfDivision } from '@/db/queries/divisions';
 import { withLeague } from '@/db/tenant';
 import { countOf } from '@/lib/domain/text/count-of';
 import { AppError, notFound } from '@/lib/platform/errors';
@@ -12,6 +12,7 @@ export async function removeDivision(
 ): Promise<{ name: string }> {
   assertCan(ctx.actor, 'division.write');
   return withLeague(ctx.league.id, async (tx) => {
+    await lockSeasonOfDivision(tx, input.divisionId);
     const division = await lockDivision(tx, input.divisionId);
     if (!division) throw notFound('division');
     const teams = await countTeams(tx, division.id);

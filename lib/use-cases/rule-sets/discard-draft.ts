@@ -1,3 +1,4 @@
+import { insertAuditEvent } from '@/db/queries/audit';
 import { deleteDraft, listRuleSetVersions, lockRuleSet } from '@/db/queries/rule-sets';
 import { withLeague } from '@/db/tenant';
 import { AppError, notFound } from '@/lib/platform/errors';
@@ -18,6 +19,15 @@ export async function discardDraft(
     if (versions.length === 1)
       throw new AppError('conflict', 'This draft is the only version of its rule set. Change it instead.');
     await deleteDraft(tx, draft.id);
+    await insertAuditEvent(
+      tx,
+      { ...ctx, userId: ctx.actor.userId },
+      {
+        type: 'rule set draft discarded',
+        subjectId: known.id,
+        data: { name: known.name, version: draft.version },
+      },
+    );
     return { version: draft.version };
   });
 }

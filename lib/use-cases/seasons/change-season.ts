@@ -1,11 +1,14 @@
 import type { z } from 'zod';
 import { insertAuditEvent } from '@/db/queries/audit';
+import { listDivisionViews } from '@/db/queries/division-view';
 import { enqueueJob } from '@/db/queries/jobs';
 import { listSeasons } from '@/db/queries/season-view';
-import { updateSeason } from '@/db/queries/seasons';
+import { lockCurrentSeason, updateSeason } from '@/db/queries/seasons';
 import { withLeague } from '@/db/tenant';
 import { listDifferences } from '@/lib/domain/audit/event';
-import { toInstant } from '@/lib/domain/dates/zone';
+import { formatDay } from '@/lib/domain/dates/format';
+import { listSeasonFaults } from '@/lib/domain/dates/list-season-faults';
+import { toDay, toInstant } from '@/lib/domain/dates/zone';
 import { AppError, notFound } from '@/lib/platform/errors';
 import { assertCan, type ActorContext } from '../context';
 import type { changeSeasonSchema } from './season-schemas';
@@ -17,6 +20,8 @@ export async function changeSeason(
 ): Promise<{ rowVersion: number }> {
   assertCan(ctx.actor, 'season.write');
   return withLeague(ctx.league.id, async (tx) => {
+    // Names are compared below, so seasons change one after the other.
+    await lockCurrentSeason(tx);
     const seasons = await listSeasons(tx);
     const before = seasons.find((season) => season.id === input.seasonId);
     if (!before) throw notFound('season');
@@ -27,6 +32,15 @@ export async function changeSeason(
     ) {
       const message = `There is another season called ${input.fields.name}. Choose another name.`;
       throw new AppError('conflict', message, { fields: { name: message } });
+    }
+    for (const division of await listDivisionViews(tx, before.id)) {
+      if (division.ownFreezesAt === null) continue;
+      const freezeOn = toDay(division.ownFreezesAt, ctx.league.timeZone);
+      const faults = listSeasonFaults({ ...input.fields, freezeOn });
+      const field = faults.freezeOn ? 'rosterOpensOn' : faults.handOutOn && 'handOutOn';
+      if (field === undefined) continue;
+      const message = `${division.name} freezes on ${formatDay(freezeOn)}, ${faults.freezeOn ? 'before rosters would be open for a day' : 'which would be on or after the hand-out day'}. Change its own freeze first.`;
+      throw new AppError('invalid', message, { fields: { [field]: message } });
     }
     const fields = {
       ...input.fields,

@@ -2,7 +2,7 @@ import type { z } from 'zod';
 import { insertAuditEvent } from '@/db/queries/audit';
 import { listDivisionViews } from '@/db/queries/division-view';
 import { listTeamViews } from '@/db/queries/team-view';
-import { lockTeam, updateTeam } from '@/db/queries/teams';
+import { lockSeasonOfTeam, lockTeam, updateTeam } from '@/db/queries/teams';
 import { withLeague } from '@/db/tenant';
 import { listDifferences } from '@/lib/domain/audit/event';
 import { AppError, notFound } from '@/lib/platform/errors';
@@ -20,6 +20,7 @@ export async function changeTeam(
 ): Promise<{ rowVersion: number }> {
   assertCan(ctx.actor, 'team.write');
   return withLeague(ctx.league.id, async (tx) => {
+    await lockSeasonOfTeam(tx, input.teamId);
     const locked = await lockTeam(tx, input.teamId);
     if (!locked) throw notFound('team');
     const teams = await listTeamViews(tx, locked.seasonId, null);

@@ -45,13 +45,13 @@ export async function importTeams(
           counts.unchanged += 1;
           continue;
         }
-        await updateTeam(tx, {
-          id: known.id,
-          rowVersion: known.rowVersion,
-          name: known.name,
-          divisionId: known.divisionId,
-          kits,
-        });
+        const { id, rowVersion, name, divisionId } = known;
+        if (!(await updateTeam(tx, { id, rowVersion, name, divisionId, kits }))) {
+          throw new AppError(
+            'conflict',
+            `${name} was removed a moment ago. Nothing of the list was imported; try again.`,
+          );
+        }
         counts.changed += 1;
         continue;
       }
