@@ -8,7 +8,8 @@ test('a manager brings a list in, fixes what the rules flag by keyboard and sugg
   await signIn(page, 'manager@tern.example');
   const { league, season } = await findSeason(page);
   await page.goto(`/${league}/${season}/rosters/herons`);
-  await expect(page.getByText('3 blockers')).toBeVisible();
+  const blockers = page.getByTitle('Show only players with a blocker');
+  await expect(blockers).toHaveText(/^3/);
   await expectAccessible(page);
 
   // From a file with headings of its own, numbers as people type them, and a row that is no player.
@@ -20,7 +21,7 @@ test('a manager brings a list in, fixes what the rules flag by keyboard and sugg
   });
   await page.getByLabel('Spieler').selectOption('Name');
   await page.getByLabel('Rückennr.').selectOption('Number');
-  await expect(page.getByText(/Row 3:/)).toBeVisible();
+  await expect(page.getByText(/Row 3: This row/)).toBeVisible();
   await expectAccessible(page);
   await page.getByText('Add new players').click();
   await page.getByRole('button', { name: 'Import 1 player' }).click();
@@ -34,21 +35,23 @@ test('a manager brings a list in, fixes what the rules flag by keyboard and sugg
 
   // A suggestion for the one number, the keyboard for the other.
   await page
-    .getByRole('row', { name: /Calloway/ })
+    .getByRole('row')
+    .filter({ hasText: /CALLOWAY/ })
     .getByRole('button', { name: '13', exact: true })
     .click();
-  await expect(page.getByText('1 blocker')).toBeVisible();
+  await expect(blockers).toHaveText(/^1/);
   await page
-    .getByRole('row', { name: /Ellery/ })
+    .getByRole('row')
+    .filter({ hasText: /ELLERY/ })
     .getByText('26', { exact: true })
     .click();
   await page.keyboard.type('25');
   await page.keyboard.press('Enter');
-  await expect(page.getByText(/blocker/)).toHaveCount(0);
+  await expect(blockers).toHaveCount(0);
   await expect(page.getByText(/^Saved \d/)).toBeVisible();
 
   await page.keyboard.press('Control+z');
-  await expect(page.getByText('1 blocker')).toBeVisible();
+  await expect(blockers).toHaveText(/^1/);
   await page.keyboard.press('Control+Shift+z');
   await expect(page.getByText(/^Saved \d/)).toBeVisible();
 
@@ -88,11 +91,11 @@ test('two people who edit one roster see each other’s change and lose nothing'
   const cell = (page: typeof one) => page.getByRole('row').nth(3);
   const before = await cell(one).innerText();
   await cell(one).getByRole('gridcell').first().click();
-  await one.keyboard.type('Quill, Wilhelmina');
+  await one.keyboard.type('QUILL');
   await one.keyboard.press('Enter');
   await expect(one.getByText(/^Saved \d/)).toBeVisible();
-  await expect(two.getByText('Quill, Wilhelmina')).toBeVisible({ timeout: 20_000 });
-  expect(before).not.toContain('Quill');
+  await expect(two.getByText('QUILL', { exact: true })).toBeVisible({ timeout: 20_000 });
+  expect(before).not.toContain('QUILL');
 });
 
 test('a manager sees no roster of another team, no people, no batches and no other league', async ({

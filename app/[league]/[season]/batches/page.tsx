@@ -11,6 +11,7 @@ import { countOf } from '@/lib/domain/text/count-of';
 import { listBatches } from '@/lib/use-cases/batches/list-batches';
 import { paths } from '@/lib/web/paths';
 import { requireLeague } from '@/lib/web/session';
+import { showNotFound } from '@/lib/web/show-not-found';
 
 export const metadata: Metadata = { title: 'Batches' };
 
@@ -19,7 +20,7 @@ type Props = { params: Promise<{ league: string; season: string }> };
 export default async function BatchesPage({ params }: Props) {
   const { league, season } = await params;
   const { ctx } = await requireLeague(league, paths.batches(league, season));
-  const { batches, ready } = await listBatches(ctx, { season });
+  const { batches, ready } = await showNotFound(listBatches(ctx, { season }));
   const action = (
     <ButtonLink look="primary" href={paths.newBatch(league, season)}>
       {ready === 0 ? 'Make a batch' : `Make a batch of ${countOf(ready, 'team')}`}

@@ -4,6 +4,7 @@ import { BackLink } from '@/components/ui/text-link';
 import { getBatchOptions } from '@/lib/use-cases/batches/list-batches';
 import { paths } from '@/lib/web/paths';
 import { requireLeague } from '@/lib/web/session';
+import { showNotFound } from '@/lib/web/show-not-found';
 import { BatchForm } from '../_components/batch-form';
 import { holdBatchAction } from '../actions';
 
@@ -17,7 +18,7 @@ type Props = {
 export default async function NewBatchPage({ params, searchParams }: Props) {
   const { league, season } = await params;
   const { ctx } = await requireLeague(league, paths.newBatch(league, season));
-  const options = await getBatchOptions(ctx, { season, batchId: null });
+  const options = await showNotFound(getBatchOptions(ctx, { season, batchId: null }));
   const asked = (await searchParams).teams?.split(',');
   const chosen = options.teams
     .filter((team) => asked === undefined || asked.includes(team.id))
