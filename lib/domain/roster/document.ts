@@ -33,6 +33,9 @@ export type RosterAnswer = {
   conflicts?: readonly EditConflict[];
 };
 
+/** When an answer came, and the name of the person at this screen, whose own changes are not marked. */
+type Now = { at: number; me: string };
+
 const mostUndo = 200;
 const mostMarks = 100;
 
@@ -140,7 +143,7 @@ export const takeBackSending = (document: RosterDocument): RosterDocument => ({
 });
 
 /** The server has done the edits on the way: its answer is the new base, its conflicts wait for the person. */
-export function acknowledge(document: RosterDocument, answer: RosterAnswer, at: number): RosterDocument {
+export function acknowledge(document: RosterDocument, answer: RosterAnswer, now: Now): RosterDocument {
   const before = viewDocument(document);
   const rebased = {
     ...document,
@@ -148,15 +151,15 @@ export function acknowledge(document: RosterDocument, answer: RosterAnswer, at: 
     base: answer.players.map(plainEntry),
     sending: [],
   };
-  return markChanges(settleWaiting(rebased, answer.conflicts ?? [], before), before, answer, at);
+  return markChanges(settleWaiting(rebased, answer.conflicts ?? [], before), before, answer, now);
 }
 
 /** Somebody else has changed the roster. Older news than what is known is ignored. */
-export function receiveNews(document: RosterDocument, answer: RosterAnswer, at: number): RosterDocument {
+export function receiveNews(document: RosterDocument, answer: RosterAnswer, now: Now): RosterDocument {
   if (answer.revision <= document.revision) return document;
   const before = viewDocument(document);
   const rebased = { ...document, revision: answer.revision, base: answer.players.map(plainEntry) };
-  return markChanges(settleWaiting(rebased, [], before), before, answer, at);
+  return markChanges(settleWaiting(rebased, [], before), before, answer, now);
 }
 
 /** Sets waiting edits that no longer fit the base aside as conflicts; of several on one cell the latest counts. */
@@ -181,7 +184,7 @@ function markChanges(
   document: RosterDocument,
   before: readonly RosterEntry[],
   answer: RosterAnswer,
-  at: number,
+  { at, me }: Now,
 ): RosterDocument {
   const known = new Map(before.map((player) => [player.id, player]));
   const names = new Map(answer.players.map(({ id, changedBy }) => [id, changedBy]));
@@ -195,6 +198,8 @@ function markChanges(
       sizes: {},
     };
     const by = names.get(player.id) ?? null;
+    // What this person did in another tab needs no telling.
+    if (by !== null && by === me) return [];
     return listDifferentCells(seen, player).map((field): ChangeMark => ({
       playerId: player.id,
       field,

@@ -52,6 +52,7 @@ const set = (document: RosterDocument, at: number, field: CellField, to: string)
   return editDocument(document, [{ kind: 'set', playerId: seen.id, field, from: readCell(seen, field), to }]);
 };
 const numbers = (document: RosterDocument) => viewDocument(document).map(({ number }) => number);
+const now = { at: 0, me: 'Ana' };
 const open = () => openDocument({ revision: 1, players: start });
 
 describe('a roster open on a screen', () => {
@@ -62,7 +63,7 @@ describe('a roster open on a screen', () => {
     document = set(document, 1, 'number', '6');
     expect(numbers(document)).toEqual(['6', '14', '21']);
     const server = new Server();
-    document = acknowledge(document, server.answer(server.save(document.sending).conflicts), 0);
+    document = acknowledge(document, server.answer(server.save(document.sending).conflicts), now);
     expect(numbers(document)).toEqual(['6', '14', '21']);
     expect([document.sending, countUnsaved(document), document.conflicts, document.marks]).toEqual([
       [],
@@ -76,7 +77,7 @@ describe('a roster open on a screen', () => {
     const server = new Server();
     let document = set(set(open(), 1, 'number', '5'), 2, 'number', '15');
     document = startSending(document, 100);
-    document = acknowledge(document, server.answer(server.save(document.sending).conflicts), 0);
+    document = acknowledge(document, server.answer(server.save(document.sending).conflicts), now);
     document = undoStep(document).document;
     expect(numbers(document)).toEqual(['5', '14', '21']);
     document = undoStep(document).document;
@@ -91,9 +92,9 @@ describe('a roster open on a screen', () => {
   it('does not take back what somebody else has changed since', () => {
     const server = new Server();
     let document = startSending(set(open(), 1, 'number', '5'), 100);
-    document = acknowledge(document, server.answer(server.save(document.sending).conflicts), 0);
+    document = acknowledge(document, server.answer(server.save(document.sending).conflicts), now);
     server.save([{ kind: 'set', playerId: idAt(1), field: 'number', from: '5', to: '9' }]);
-    document = receiveNews(document, server.answer(), 0);
+    document = receiveNews(document, server.answer(), now);
     const turned = undoStep(document);
     expect(turned.skipped).toBe(1);
     expect(numbers(turned.document)).toEqual(['9', '14', '21']);
@@ -102,24 +103,30 @@ describe('a roster open on a screen', () => {
   it('marks a cell that somebody else has changed, until it is typed into', () => {
     const server = new Server();
     server.save([{ kind: 'set', playerId: idAt(2), field: 'number', from: '14', to: '15' }]);
-    let document = receiveNews(open(), server.answer(), 77);
+    let document = receiveNews(open(), server.answer(), { ...now, at: 77 });
     expect(document.marks).toEqual([{ playerId: idAt(2), field: 'number', by: 'Ben', at: 77 }]);
     document = set(document, 2, 'number', '16');
     expect(document.marks).toEqual([]);
+  });
+
+  it('does not mark what the same person changed in another tab', () => {
+    const server = new Server();
+    server.save([{ kind: 'set', playerId: idAt(2), field: 'number', from: '14', to: '15' }]);
+    expect(receiveNews(open(), server.answer(), { at: 0, me: 'Ben' }).marks).toEqual([]);
   });
 
   it('ignores news older than what it knows', () => {
     const server = new Server();
     const old = server.answer();
     let document = startSending(set(open(), 1, 'number', '5'), 100);
-    document = acknowledge(document, server.answer(server.save(document.sending).conflicts), 0);
-    expect(receiveNews(document, old, 0)).toBe(document);
+    document = acknowledge(document, server.answer(server.save(document.sending).conflicts), now);
+    expect(receiveNews(document, old, now)).toBe(document);
   });
 
   it('shows a conflict with both values and lets the person keep either', () => {
     const server = new Server();
     server.save([{ kind: 'set', playerId: idAt(1), field: 'number', from: '4', to: '9' }]);
-    const document = receiveNews(set(open(), 1, 'number', '5'), server.answer(), 0);
+    const document = receiveNews(set(open(), 1, 'number', '5'), server.answer(), now);
     const [conflict] = document.conflicts;
     expect(conflict).toMatchObject({ edit: { to: '5' }, theirs: { is: 'cell', value: '9' } });
     expect(numbers(document)[0]).toBe('9');
@@ -136,7 +143,7 @@ describe('a roster open on a screen', () => {
     let document = receiveNews(
       set(set(open(), 2, 'number', '15'), 2, 'role', 'goalkeeper'),
       server.answer(),
-      0,
+      now,
     );
     expect(document.conflicts).toHaveLength(2);
     for (const conflict of document.conflicts) document = keepMine(document, conflict);
@@ -176,7 +183,7 @@ function play(
     const sent = startSending(document, 3);
     if (sent.sending.length === 0) return sent;
     const { conflicts } = server.save(sent.sending);
-    return lost ? sent : acknowledge(sent, server.answer(conflicts), 0);
+    return lost ? sent : acknowledge(sent, server.answer(conflicts), now);
   };
   for (const { who: asked, what, row, field, value } of actions) {
     const who = asked % people;
@@ -198,7 +205,7 @@ function play(
       }
       if (what === 'undo') return undoStep(document).document;
       if (what === 'lose') return send(document, true);
-      if (what === 'news') return receiveNews(document, server.answer(), 0);
+      if (what === 'news') return receiveNews(document, server.answer(), now);
       return what === 'send' || what === 'answer' ? send(document, false) : document;
     };
     screens[who] = step();
@@ -209,7 +216,7 @@ function play(
       if (round > 500) throw new Error('edits are sent for ever');
       rest = send(rest, false);
     }
-    return receiveNews(rest, server.answer(), 0);
+    return receiveNews(rest, server.answer(), now);
   };
   return { server, screens: screens.slice(0, people), drain };
 }
@@ -224,7 +231,7 @@ describe('screens and a server', () => {
       fc.property(fc.array(actionArb, { maxLength: 40 }), (actions) => {
         const { server, screens, drain } = play(actions, 2);
         const ended = screens.map(drain).map(drain);
-        for (const document of ended.map((one) => receiveNews(one, server.answer(), 0))) {
+        for (const document of ended.map((one) => receiveNews(one, server.answer(), now))) {
           expect(sameList(viewDocument(document), server.players)).toBe(true);
         }
       }),

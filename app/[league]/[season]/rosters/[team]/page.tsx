@@ -30,7 +30,7 @@ export default async function RosterPage({ params }: Props) {
     <RosterEditor
       key={roster.id}
       league={{ slug: league, timeZone: ctx.league.timeZone }}
-      userId={ctx.actor.userId}
+      user={{ id: ctx.actor.userId, name: ctx.actor.name }}
       today={ctx.now}
       roster={roster}
       steps={{

@@ -48,19 +48,19 @@ import { useRosterSession } from './use-roster-session';
  */
 export function RosterEditor({
   league,
-  userId,
+  user,
   today,
   roster,
   steps,
 }: {
   league: { slug: string; timeZone: string };
-  userId: string;
+  user: { id: string; name: string };
   today: Date;
   roster: RosterPage;
   steps: RosterSteps;
 }) {
   const editable = roster.may.edit && isRosterEditable(roster.state);
-  const open = useRosterSession(paths.api.roster(league.slug, roster.id), roster, userId, editable);
+  const open = useRosterSession(paths.api.roster(league.slug, roster.id), roster, user, editable);
   const { session, view, document: held } = open;
   const showToast = useToast();
   const [place, setPlace] = useState<Place | null>(null);
@@ -243,6 +243,7 @@ export function RosterEditor({
         roster={roster}
         restored={open.restored}
         leftovers={open.leftovers}
+        unsaved={open.unsaved}
         onDismiss={() => session.dismissRestored()}
         onDiscard={() => void session.discardLeftovers()}
       />

@@ -1,6 +1,7 @@
 'use client';
 
 import { useState } from 'react';
+import { RosterStateTag } from '@/components/status/roster-state-tag';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { IconButton } from '@/components/ui/icon-button';
 import { Menu, type MenuItem } from '@/components/ui/menu';
@@ -123,7 +124,16 @@ export function RosterHead({
       <PageHeader
         back={<BackLink href={paths.rosters(league, season.slug)}>Rosters</BackLink>}
         picture={<YokeTile kit={team.kits.home} number={number} size="lg" />}
-        title={team.name}
+        title={
+          state === 'open' ? (
+            team.name
+          ) : (
+            <span className="inline-flex flex-wrap items-center gap-x-3 gap-y-1">
+              {team.name}
+              <RosterStateTag state={state} />
+            </span>
+          )
+        }
         subtitle={`${division.name}, ${players} of ${division.leastPlayers}–${division.mostPlayers} players, ${describeFreeze(
           roster,
           today,

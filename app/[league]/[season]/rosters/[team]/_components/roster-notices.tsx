@@ -1,6 +1,7 @@
 'use client';
 
 import { Button } from '@/components/ui/button';
+import { IconButton } from '@/components/ui/icon-button';
 import { Notice } from '@/components/ui/notice';
 import { TextLink } from '@/components/ui/text-link';
 import { formatInstant } from '@/lib/domain/dates/format';
@@ -16,6 +17,7 @@ export function RosterNotices({
   roster,
   restored,
   leftovers,
+  unsaved,
   onDismiss,
   onDiscard,
 }: {
@@ -24,6 +26,7 @@ export function RosterNotices({
   roster: RosterPage;
   restored: SessionSnapshot['restored'];
   leftovers: SessionSnapshot['leftovers'];
+  unsaved: number;
   onDismiss: () => void;
   onDiscard: () => void;
 }) {
@@ -54,12 +57,16 @@ export function RosterNotices({
           live="polite"
           title={`${countOf(restored.count, 'change')} from ${when(restored.at)} put back`}
           action={
-            <Button size="sm" onClick={onDismiss}>
-              Good
-            </Button>
+            <IconButton
+              icon="close"
+              label="Put this notice away"
+              onClick={onDismiss}
+              className="-my-1.5 -mr-2"
+            />
           }
         >
-          They were kept on this device because they had not been saved. They are being saved now.
+          Kept on this device because {restored.count === 1 ? 'it' : 'they'} had not been saved.{' '}
+          {unsaved > 0 ? 'Being saved now.' : 'Saved now.'}
         </Notice>
       )}
       {leftovers !== null && (

@@ -46,6 +46,8 @@ type Props = {
   store: KeptWorkStore;
   /** The state of the roster has changed, so the page must be read again. */
   onStale: () => void;
+  /** The name of the person at this screen. */
+  me: string;
   fetch: typeof fetch;
   now: () => number;
 };
@@ -155,7 +157,7 @@ export class RosterSession {
     this.state = roster.state;
     const wasEditable = this.editable;
     this.editable = editable;
-    const document = receiveNews(this.snapshot.document, roster, this.props.now());
+    const document = receiveNews(this.snapshot.document, roster, this.readNow());
     if (wasEditable && !editable) this.putAside(document);
     else this.publish({ document });
     if (!wasEditable && editable) void this.restore();
@@ -172,7 +174,7 @@ export class RosterSession {
       { changed: false } | ({ changed: true; state: RosterState } & RosterAnswer);
     if (news.changed) {
       if (news.state !== this.state) this.props.onStale();
-      this.publish({ document: receiveNews(this.snapshot.document, news, this.props.now()) });
+      this.publish({ document: receiveNews(this.snapshot.document, news, this.readNow()) });
     }
     return this.snapshot.document.revision;
   }
@@ -183,6 +185,10 @@ export class RosterSession {
     this.props.store.forget(left.map(({ key }) => key));
     this.aside = null;
     this.publish({ document: this.snapshot.document, leftovers: null });
+  }
+
+  private readNow() {
+    return { at: this.props.now(), me: this.props.me };
   }
 
   private change(document: RosterDocument): void {
@@ -226,7 +232,7 @@ export class RosterSession {
       if (response.ok) {
         const answer = (await response.json()) as RosterAnswer;
         this.failures = 0;
-        const document = acknowledge(this.snapshot.document, answer, this.props.now());
+        const document = acknowledge(this.snapshot.document, answer, this.readNow());
         this.publish({ document, save: { is: 'saved', at: this.props.now() } });
         return this.editable;
       }

@@ -12,7 +12,12 @@ const pollMs = 5_000;
 const markMs = 60_000;
 
 /** Opens a roster in this tab: what is seen, how the saving stands, and the session to change it through. */
-export function useRosterSession(url: string, roster: RosterPage, userId: string, editable: boolean) {
+export function useRosterSession(
+  url: string,
+  roster: RosterPage,
+  user: { id: string; name: string },
+  editable: boolean,
+) {
   const router = useRouter();
   const toFacts = (page: RosterPage) => ({
     revision: page.revision,
@@ -27,10 +32,11 @@ export function useRosterSession(url: string, roster: RosterPage, userId: string
         roster: toFacts(roster),
         editable,
         store: new KeptWorkStore(findStorage(), findLocks(), {
-          userId,
+          userId: user.id,
           rosterId: roster.id,
           tabId: makeId(),
         }),
+        me: user.name,
         onStale: () => router.refresh(),
         fetch: (...args) => fetch(...args),
         now: () => Date.now(),
