@@ -4,15 +4,15 @@ import { changeDivision } from '@/lib/use-cases/divisions/change-division';
 import { divisionFieldsSchema, type DivisionInput } from '@/lib/use-cases/divisions/division-schemas';
 import { getDivisionForm, listDivisions } from '@/lib/use-cases/divisions/list-divisions';
 import { removeDivision } from '@/lib/use-cases/divisions/remove-division';
-import { addTeam } from '@/lib/use-cases/teams/add-team';
 import {
   buildDivision,
   buildTeam,
   buildWorld,
   someGarments,
-  someKit,
   type FurnishedLeague,
 } from '../../factories/league';
+import { codeOf } from '../../support/outcomes';
+import { whileTeamIsAdded } from '../../support/slow-writer';
 import { queryAsAdmin } from '../../support/database';
 
 let world: FurnishedLeague;
@@ -103,7 +103,7 @@ describe('adding a division', () => {
     expect(await add('New')).toEqual({ slug: 'new-1' });
     await expect(add('girls u-14')).rejects.toMatchObject({ code: 'conflict' });
     const twice = await Promise.allSettled([add('Boys'), add('Boys')]);
-    expect(twice.map((one) => one.status).sort()).toEqual(['fulfilled', 'rejected']);
+    expect(twice.map(codeOf).sort()).toEqual(['conflict', 'done']);
   });
 
   it('takes only rule sets and seasons of its own league', async () => {
@@ -185,16 +185,13 @@ describe('removing a division', () => {
     expect(await queryAsAdmin('select 1 from garments where division_id = $1', [division.id])).toEqual([]);
   });
 
-  it('and adding a team to it at the same moment end as one or the other', async () => {
+  it('waits for whoever is adding a team to it, and is then refused', async () => {
     const division = await buildDivision(world.league, world.season);
-    const fields = { name: 'Late', divisionId: division.id, kits: { home: someKit, away: null } };
-    const outcomes = await Promise.allSettled([
+    const place = { leagueId: world.league.id, seasonId: world.season.id, divisionId: division.id };
+    const outcome = await whileTeamIsAdded(place, { name: 'Late', slug: 'late' }, () =>
       removeDivision(world.admin, { divisionId: division.id }),
-      addTeam(world.admin, { season: world.season.slug, fields }),
-    ]);
-    const refused = outcomes.filter((one) => one.status === 'rejected');
-    expect(refused).toHaveLength(1);
-    expect(['conflict', 'not-found']).toContain((refused[0]?.reason as { code?: string }).code);
+    );
+    expect(codeOf(outcome)).toBe('conflict');
   });
 });
 

@@ -13,6 +13,8 @@ import {
   someKit,
   type FurnishedLeague,
 } from '../../factories/league';
+import { codeOf } from '../../support/outcomes';
+import { whileTeamIsAdded } from '../../support/slow-writer';
 import { holdBatch } from '@/lib/use-cases/batches/hold-batch';
 import { queryAsAdmin } from '../../support/database';
 
@@ -26,6 +28,11 @@ const kits = { home: someKit, away: null };
 const red = { ...someKit, name: 'red', body: '#b01f24', sleeves: '#b01f24' };
 const add = (name: string, divisionId = world.division.id) =>
   addTeam(world.admin, { season: world.season.slug, fields: { name, divisionId, kits } });
+const place = () => ({
+  leagueId: world.league.id,
+  seasonId: world.season.id,
+  divisionId: world.division.id,
+});
 const find = async (slug: string) => {
   const { teams } = await listTeams(world.admin, { season: world.season.slug });
   const team = teams.find((entry) => entry.slug === slug);
@@ -52,8 +59,11 @@ describe('adding a team', () => {
       code: 'conflict',
       fields: { 'fields.name': expect.stringContaining('HERONS') },
     });
-    const twice = await Promise.allSettled([add('Egrets'), add('Egrets')]);
-    expect(twice.map((one) => one.status).sort()).toEqual(['fulfilled', 'rejected']);
+  });
+
+  it('waits for whoever is adding the same team, and is then refused', async () => {
+    const outcome = await whileTeamIsAdded(place(), { name: 'Egrets', slug: 'egrets' }, () => add('Egrets'));
+    expect(codeOf(outcome)).toBe('conflict');
   });
 
   it('takes only divisions of the season', async () => {
@@ -197,21 +207,19 @@ describe('importing teams', () => {
     expect((await listTeams(world.admin, { season: world.season.slug })).teams).toHaveLength(before);
   });
 
-  it('and adding one of its teams by hand at the same moment make that team once', async () => {
+  it('waits for whoever is adding one of its teams, and then changes that one', async () => {
     const division = await buildDivision(world.league, world.season);
-    await Promise.allSettled([
-      importTeams(world.admin, {
-        season: world.season.slug,
-        teams: [line('Twice', division.id), line('Other', division.id)],
-        refused: 0,
-      }),
-      add('Twice', division.id),
-    ]);
-    const { teams } = await listTeams(world.admin, { season: world.season.slug });
-    expect(teams.filter((team) => team.divisionId === division.id).map((team) => team.name)).toEqual([
-      'Other',
-      'Twice',
-    ]);
+    const outcome = await whileTeamIsAdded(
+      { ...place(), divisionId: division.id },
+      { name: 'Twice', slug: 'twice' },
+      () =>
+        importTeams(world.admin, {
+          season: world.season.slug,
+          teams: [line('Twice', division.id), line('Other', division.id)],
+          refused: 0,
+        }),
+    );
+    expect(outcome).toEqual({ status: 'fulfilled', value: { added: 1, changed: 1, unchanged: 0 } });
   });
 });
 
