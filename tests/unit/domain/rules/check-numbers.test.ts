@@ -55,6 +55,11 @@ describe('numbers that cannot be worn', () => {
     expect(check({ labels: { allowed: '1-99' } }, '50', '50')[0]?.suggestions).toEqual(['49', '51', '48']);
   });
 
+  it('offers only one of two labels that count as the same', () => {
+    const rules: RuleSetChanges = { labels: { allowed: '0, 00, 1-3', zeroAndDoubleZero: 'one value' } };
+    expect(check(rules, '1', '2', '3', '4').at(-1)?.suggestions).toEqual(['0']);
+  });
+
   it('weighs what the rule set says and is silent when the rule is off', () => {
     expect(check({ labels: { weight: 'caution' } }, '100')).toMatchObject([{ severity: 'caution' }]);
     expect(check({ labels: { weight: 'off' } }, '100', '', 'seven')).toEqual([]);

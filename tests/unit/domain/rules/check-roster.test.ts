@@ -82,6 +82,13 @@ describe('names on the back', () => {
     expect(suggest({ onBack: 'allowed' }, { nameOnBack: '' })).toEqual([]);
   });
 
+  it('that are wanted are not offered as another player wears them where that needs an initial', () => {
+    const rules = { onBack: 'wanted', sharedSurnameNeedsInitial: true } as const;
+    expect(
+      suggest(rules, { name: 'Al Brook', nameOnBack: 'BROOK' }, { name: 'Ann Brook', nameOnBack: '' }),
+    ).toEqual([['name-on-back-missing', ['A BROOK', 'AN BROOK', 'ANN BROOK']]]);
+  });
+
   it('are sent back where none is worn', () => {
     expect(say({ names: { onBack: 'not allowed' } }, [makeLine()], [])).toEqual([
       [0, 'name-on-back-not-wanted', 'No names are worn on the back here. Take “CALLOWAY” off.'],
