@@ -4,11 +4,6 @@ import { z } from 'zod';
 export const ruleWeightSchema = z.enum(['blocker', 'caution', 'off']);
 export type RuleWeight = z.infer<typeof ruleWeightSchema>;
 
-/** A label as worn: digits only, `0` and `00` differ, `07` is not `7`. At most three digits. */
-export const labelSchema = z
-  .string()
-  .regex(/^[0-9]{1,3}$/, 'Write a number of one to three digits, such as 7 or 00.');
-
 /** Where a value comes from and how it is known. Printed beside every verdict that rests on it. */
 export const citationSchema = z.object({
   body: z.string().max(120),

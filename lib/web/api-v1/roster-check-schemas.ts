@@ -54,7 +54,10 @@ export const ruleCatalogueSchema = z
           sport: z.string(),
           title: z.string(),
           summary: z.string(),
-          citations: z.array(citationSchema),
+          inForce: z
+            .object({ from: z.string().nullable(), to: z.string().nullable() })
+            .describe('Days from and to which the code held, where known.'),
+          citations: z.array(citationSchema.extend({ settles: z.array(z.string()), says: z.string() })),
           open: z.array(z.string()).describe('What the source does not say and the league must decide.'),
           checkYourBook: z.string(),
           ruleSet: ruleSetSchema,
