@@ -1,8 +1,6 @@
 import type { LeagueTx } from '../tenant';
 import { deleteStoredFile } from './stored-files';
 
-export type BundleState = 'queued' | 'building' | 'ready' | 'failed';
-
 /** The bundle of a batch with its finished files; undefined before the batch is released. */
 export async function findBundle(tx: LeagueTx, batchId: string) {
   return tx

@@ -1,8 +1,6 @@
 import { z } from 'zod';
 import { isDay } from './day';
 
-export { daysBetween } from './day';
-
 /**
  * An instant read from a clock on the wall. `note` is there when the wall clock is ambiguous: a `skipped hour` does not
  * exist on that day (clocks go forward), a `repeated hour` exists twice (clocks go back).

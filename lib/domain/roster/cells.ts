@@ -48,7 +48,3 @@ export const makeEmptyEntry = (id: string): RosterEntry => ({
   sizes: {},
   extra: {},
 });
-
-/** Whether a player holds nothing at all. */
-export const isEmptyEntry = (player: RosterEntry): boolean =>
-  listCells(player).length === 0 && Object.keys(player.extra).length === 0;

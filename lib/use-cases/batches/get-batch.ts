@@ -34,7 +34,6 @@ export async function getBatch(ctx: ActorContext, input: { code: string }) {
     };
   });
 }
-export type BatchDetail = Awaited<ReturnType<typeof getBatch>>;
 
 type Snapshot = NonNullable<Awaited<ReturnType<typeof findSnapshot>>>['snapshot'];
 

@@ -18,7 +18,6 @@ export async function listBatches(ctx: ActorContext, input: { season: string }) 
     return { season, batches, ready };
   });
 }
-export type BatchList = Awaited<ReturnType<typeof listBatches>>;
 
 const isReady = (state: string): boolean => state === 'signed off' || state === 'frozen';
 

@@ -29,7 +29,6 @@ export async function listDivisions(ctx: ActorContext, input: { season: string }
     };
   });
 }
-export type DivisionList = Awaited<ReturnType<typeof listDivisions>>;
 
 /** What the form of a division needs: the division (undefined for a new one) and the rule sets to pick from. */
 export async function getDivisionForm(ctx: ActorContext, input: { season: string; division: string | null }) {

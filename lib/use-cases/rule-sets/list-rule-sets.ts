@@ -42,4 +42,3 @@ export async function listRuleSets(ctx: ActorContext) {
     return entries.filter((entry) => entry.inForce && (visible === null || played.has(entry.id)));
   });
 }
-export type RuleSetList = Awaited<ReturnType<typeof listRuleSets>>;

@@ -15,4 +15,3 @@ export async function listSeasons(ctx: ActorContext) {
     }));
   });
 }
-export type SeasonList = Awaited<ReturnType<typeof listSeasons>>;
