@@ -9,7 +9,13 @@ import {
 import type { Player } from './player';
 
 /** What a roster becomes when a file is brought in. `undecided` lines wait for a person; nothing is to be written then. */
-export type MergedRoster = { players: RosterEntry[]; undecided: number; unchanged: number };
+export type MergedRoster = {
+  players: RosterEntry[];
+  undecided: number;
+  unchanged: number;
+  /** Where each incoming line (by its place from 0) ended up in `players`; lines that wait are not in it. */
+  placeOfLine: ReadonlyMap<number, number>;
+};
 
 /**
  * The roster after a file has been merged into it: players keep their place, changed ones take what the file says, new
@@ -37,7 +43,16 @@ export function mergePlayers(given: {
         : { id, name, nameOnBack, number, role, sizes, extra };
     });
   const added = steps.add.map(({ line, extra }): RosterEntry => ({ id: given.newId(), ...line, extra }));
+  const places = new Map(kept.map(({ id }, at) => [id, at]));
+  const placeOfLine = new Map([
+    ...plan.matched.flatMap(({ row, id }): [number, number][] => {
+      const at = places.get(id);
+      return at === undefined ? [] : [[row, at]];
+    }),
+    ...plan.added.map(({ row }, at): [number, number] => [row, kept.length + at]),
+  ]);
   return {
+    placeOfLine,
     players: [...kept, ...added],
     undecided: steps.leftAlone.ambiguous.length,
     unchanged: kept.length - updates.size,

@@ -27,6 +27,8 @@ export type MergePlan = {
   added: { row: number; incoming: IncomingLine }[];
   changed: PlayerChange[];
   unchanged: Player[];
+  /** Which player each line that found one is: `row` is its place (from 0) among the incoming lines. */
+  matched: { row: number; id: string }[];
   ambiguous: AmbiguousLine[];
   /** Players that no line names, not even perhaps. Only `replace` removes them. */
   missing: Player[];
@@ -128,7 +130,7 @@ export function planMerge(
   incoming: readonly IncomingLine[],
   decisions: MergeDecisions = new Map(),
 ): MergePlan {
-  const plan: MergePlan = { added: [], changed: [], unchanged: [], ambiguous: [], missing: [] };
+  const plan: MergePlan = { added: [], changed: [], unchanged: [], matched: [], ambiguous: [], missing: [] };
   const rows = incoming.map((each, row): Row => ({ row, incoming: each }));
   const byId = new Map(existing.map((player) => [player.id, player]));
   const verdicts = new Map<number, Verdict>();
@@ -169,6 +171,7 @@ export function planMerge(
       plan.ambiguous.push({ ...each, ...verdict });
       for (const { id } of verdict.candidates) doubted.add(id);
     } else {
+      plan.matched.push({ row: each.row, id: verdict.match.id });
       const before = linePart(verdict.match);
       const after = mergeLine(verdict.match, each.incoming);
       if (sameLine(before, after)) plan.unchanged.push(verdict.match);

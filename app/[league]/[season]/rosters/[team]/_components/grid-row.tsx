@@ -7,19 +7,10 @@ import type { ChangeMark } from '@/lib/domain/roster/document';
 import type { RosterColumn } from '@/lib/domain/roster/roster-columns';
 import type { Finding } from '@/lib/domain/rules/finding';
 import { gravestOf } from './cell-findings';
+import { cardCell, cardPlace, cardRow, severityLook } from './cell-looks';
 
-/** On a phone a row is a card: the number beside the name, below them tiles with their headings, then what to do. */
-const cardCell = 'max-sm:block max-sm:h-auto max-sm:min-w-0 max-sm:rounded-control';
-const tile =
-  'max-sm:border-hem max-sm:min-w-20 max-sm:flex-1 max-sm:border max-sm:before:content-[attr(data-label)] ' +
-  'max-sm:before:block max-sm:before:px-2 max-sm:before:pt-1 max-sm:before:text-[0.6875rem] max-sm:before:font-[560] max-sm:before:text-dusk';
-const places: Partial<Record<string, string>> = {
-  name: 'max-sm:order-2 max-sm:basis-40 max-sm:grow',
-  number: 'max-sm:order-1 max-sm:w-14 max-sm:border max-sm:border-hem',
-  nameOnBack: `max-sm:order-4 max-sm:basis-32 ${tile}`,
-};
 const cellLook =
-  'border-hem relative h-[2.625rem] sm:border-t p-0 align-middle font-normal focus-visible:z-10 focus-visible:-outline-offset-2 ' +
+  'border-hem relative h-[2.625rem] p-0 align-middle font-normal focus-visible:z-10 focus-visible:-outline-offset-2 sm:border-t ' +
   cardCell;
 
 type Handlers = {
@@ -73,10 +64,7 @@ export function GridRow({
     <tr
       role="row"
       aria-rowindex={rowIndex}
-      className={joinClasses(
-        'group/row max-sm:border-hem max-sm:flex max-sm:flex-wrap max-sm:gap-2 max-sm:border-t max-sm:p-3',
-        activeColumn !== null && 'sm:bg-cotton',
-      )}
+      className={joinClasses('group/row', cardRow, activeColumn !== null && 'sm:bg-cotton')}
     >
       {columns.map((column, at) => {
         const severity = gravestOf(findings, column.field);
@@ -94,7 +82,7 @@ export function GridRow({
             className={joinClasses(
               cellLook,
               editable && 'cursor-cell',
-              places[column.field] ?? `max-sm:order-5 ${tile}`,
+              cardPlace(column.field),
               column.field === 'number' && 'sm:text-right',
               severity !== null && severityLook[severityTone[severity]],
               severity === null && marked && 'bg-damson-wash',
@@ -141,13 +129,6 @@ const widths: Partial<Record<string, string>> = {
   nameOnBack: 'sm:min-w-28 sm:max-w-48',
   number: 'sm:min-w-14',
   role: 'sm:min-w-24',
-};
-
-/** A bar at the left and a wash, so that the colour is not the only sign. */
-const severityLook: Record<string, string> = {
-  stop: 'true-colour bg-stop-wash shadow-[inset_3px_0_0_var(--stop)]',
-  care: 'true-colour bg-care-wash shadow-[inset_3px_0_0_var(--care)]',
-  note: 'true-colour bg-note-wash shadow-[inset_3px_0_0_var(--note)]',
 };
 
 /** What a cell shows while nobody edits it; it keeps its room under the input. */

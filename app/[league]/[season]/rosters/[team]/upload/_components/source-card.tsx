@@ -9,6 +9,7 @@ import { Notice } from '@/components/ui/notice';
 import { Textarea } from '@/components/ui/textarea';
 import { encodingChoices, type EncodingLabel } from '@/lib/domain/roster/import/decode-text';
 import { fileLimits } from '@/lib/domain/roster/import/limits';
+import type { Delimiter } from '@/lib/domain/roster/import/parse-table';
 import { sampleFiles } from '@/lib/domain/roster/import/samples';
 import { bringFile, bringPaste, bringText, type Brought, type Source } from './source';
 
@@ -43,6 +44,19 @@ export function SourceCard({
       );
     }
     setBusy(false);
+  };
+  /** The same bytes in another encoding, or cut at another separator. */
+  const readAnew = (change: { encoding?: EncodingLabel | ''; delimiter?: Delimiter }) => {
+    if (!source?.text) return;
+    const { bytes, chosen } = source.text;
+    const encoding = change.encoding ?? chosen.encoding;
+    const delimiter = change.delimiter ?? chosen.delimiter;
+    take(
+      bringText(source.from, bytes, {
+        ...(encoding && { encoding }),
+        ...(delimiter !== undefined && { delimiter }),
+      }),
+    );
   };
   return (
     <Card title="The list">
@@ -91,15 +105,19 @@ export function SourceCard({
           <SelectField
             label="Letters read as"
             className="w-64"
-            placeholder={source.text.encoding}
+            placeholder={
+              source.text.chosen.encoding === undefined ? source.text.encoding : 'As guessed at first'
+            }
             options={encodingChoices.map((choice) => ({ value: choice.label, label: choice.name }))}
-            defaultValue=""
-            onChange={(event) => {
-              if (source.text)
-                take(
-                  bringText(source.from, source.text.bytes, (event.target.value as EncodingLabel) || null),
-                );
-            }}
+            value={source.text.chosen.encoding ?? ''}
+            onChange={(event) => readAnew({ encoding: event.target.value as EncodingLabel | '' })}
+          />
+          <SelectField
+            label="Cells parted by"
+            className="w-40"
+            options={separators}
+            value={source.text.delimiter}
+            onChange={(event) => readAnew({ delimiter: event.target.value as Delimiter })}
           />
           {!source.text.sure && source.text.sample.length > 0 && (
             <p className="text-care type-small pb-2">
@@ -132,3 +150,10 @@ export function SourceCard({
     </Card>
   );
 }
+
+const separators: { value: Delimiter; label: string }[] = [
+  { value: ',', label: 'commas' },
+  { value: ';', label: 'semicolons' },
+  { value: '\t', label: 'tabs' },
+  { value: '|', label: 'bars' },
+];

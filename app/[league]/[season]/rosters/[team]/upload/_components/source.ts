@@ -1,6 +1,6 @@
 import { decodeText, decodeTextAs, type EncodingLabel } from '@/lib/domain/roster/import/decode-text';
 import { refuseSize } from '@/lib/domain/roster/import/limits';
-import { parseTable } from '@/lib/domain/roster/import/parse-table';
+import { parseTable, type Delimiter } from '@/lib/domain/roster/import/parse-table';
 
 export type Sheet = { name: string; rows: string[][]; notes: string[] };
 
@@ -8,8 +8,18 @@ export type Sheet = { name: string; rows: string[][]; notes: string[] };
 export type Source = {
   from: string;
   sheets: Sheet[];
-  text: { bytes: Uint8Array; encoding: string; sure: boolean; sample: string[] } | null;
+  text: {
+    bytes: Uint8Array;
+    encoding: string;
+    sure: boolean;
+    sample: string[];
+    delimiter: Delimiter;
+    chosen: TextChoice;
+  } | null;
 };
+/** What a person chose where the guess was wrong; empty while the guess stands. */
+export type TextChoice = { encoding?: EncodingLabel; delimiter?: Delimiter };
+
 export type Brought = { ok: true; source: Source } | { ok: false; message: string };
 
 const noteProblems = (problems: readonly { rowNumber: number; message: string }[]): string[] =>
@@ -30,20 +40,30 @@ export function bringPaste(text: string): Brought {
   };
 }
 
-/** Reads delimited text in the browser, in the encoding it seems to have or the one a person chose. */
-export function bringText(name: string, bytes: Uint8Array, chosen: EncodingLabel | null): Brought {
-  const decoded = chosen === null ? decodeText(bytes) : decodeTextAs(bytes, chosen);
+/** Reads delimited text in the browser, in the encoding and by the separator it seems to have or a person chose. */
+export function bringText(name: string, bytes: Uint8Array, chosen: TextChoice): Brought {
+  const decoded = chosen.encoding === undefined ? decodeText(bytes) : decodeTextAs(bytes, chosen.encoding);
   if (!decoded.ok) return { ok: false, message: decoded.message };
-  const parsed = parseTable(decoded.text);
+  const parsed = parseTable(
+    decoded.text,
+    chosen.delimiter === undefined ? {} : { delimiter: chosen.delimiter },
+  );
   if (!parsed.ok) return { ok: false, message: parsed.message };
-  const { rows, notes, problems } = parsed.table;
+  const { rows, notes, problems, delimiter } = parsed.table;
   const all = [...(decoded.note === undefined ? [] : [decoded.note]), ...notes, ...noteProblems(problems)];
   return {
     ok: true,
     source: {
       from: name,
       sheets: [{ name, rows, notes: all }],
-      text: { bytes, encoding: decoded.encoding, sure: decoded.sure, sample: decoded.sample },
+      text: {
+        bytes,
+        encoding: decoded.encoding,
+        sure: decoded.sure,
+        sample: decoded.sample,
+        delimiter,
+        chosen,
+      },
     },
   };
 }
@@ -56,7 +76,7 @@ export async function bringFile(file: File, readUrl: string): Promise<Brought> {
   if (tooLarge) return { ok: false, message: tooLarge.message };
   const bytes = new Uint8Array(await file.arrayBuffer());
   if (/\.(csv|tsv|txt)$/i.test(file.name)) {
-    const here = bringText(file.name, bytes, null);
+    const here = bringText(file.name, bytes, {});
     if (here.ok) return here;
   }
   const response = await fetch(`${readUrl}?name=${encodeURIComponent(file.name)}`, {

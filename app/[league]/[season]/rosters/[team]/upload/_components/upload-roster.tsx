@@ -13,7 +13,8 @@ import { guessMapping, reuseMapping, type ColumnMapping } from '@/lib/domain/ros
 import { findHeadingRow, headingSignature, listHeadings } from '@/lib/domain/roster/import/find-headings';
 import { mergeModes, planMerge, type MergeMode } from '@/lib/domain/roster/import/merge-roster';
 import { readRoster } from '@/lib/domain/roster/import/read-roster';
-import type { Garment, Player } from '@/lib/domain/roster/player';
+import { mergePlayers } from '@/lib/domain/roster/merge-players';
+import { mostPlayersPerRoster, type Garment, type Player } from '@/lib/domain/roster/player';
 import type { RuleSet } from '@/lib/domain/rules/rule-set';
 import { countOf } from '@/lib/domain/text/count-of';
 import type { KeptMapping } from '@/lib/use-cases/rosters/list-mappings';
@@ -92,6 +93,7 @@ export function UploadRoster({
     setRecalled(remembered !== null);
     setMapping(remembered ?? guessMapping(rows, roster.garments));
     setDecisions(new Map());
+    forget();
   };
 
   const rows = source?.sheets[sheet]?.rows;
@@ -103,16 +105,29 @@ export function UploadRoster({
     () => (reading ? planMerge(roster.players, reading.lines, decisions) : null),
     [reading, roster.players, decisions],
   );
-  const undecided = plan && mode !== 'add' ? plan.ambiguous.length : 0;
+  const merged = useMemo(() => {
+    let added = 0;
+    return reading
+      ? mergePlayers({
+          players: roster.players,
+          lines: reading.lines,
+          decisions,
+          mode,
+          newId: () => `line ${(added += 1)}`,
+        })
+      : null;
+  }, [reading, roster.players, decisions, mode]);
+  // Also when only new players are added: a line in doubt would be left out without a word.
+  const undecided = plan?.ambiguous.length ?? 0;
   const removed = plan && mode === 'replace' ? plan.missing.length : 0;
   const changed = plan && mode !== 'add' ? plan.changed.length : 0;
   const work = (plan?.added.length ?? 0) + changed + removed;
 
-  const { submit, pending, failure } = useSubmit(
-    () => {
+  const { submit, pending, failure, forget } = useSubmit(
+    async () => {
       if (!reading || !rows || !mapping) throw new Error('nothing was read yet');
       const signature = headingSignature(listHeadings(rows, mapping.headerRow).headings);
-      return onImport(league, {
+      const answer = await onImport(league, {
         rosterId: roster.id,
         revision: roster.revision,
         mode,
@@ -124,6 +139,9 @@ export function UploadRoster({
             ? null
             : { signature: signature.slice(0, 2000), mapping },
       });
+      // Somebody has changed the roster meanwhile: the page is read again, and the plan with it; the list stays.
+      if (!answer.ok && answer.error.code === 'conflict') router.refresh();
+      return answer;
     },
     (done) => {
       showToast({
@@ -138,7 +156,7 @@ export function UploadRoster({
   return (
     <div className="grid gap-5">
       <SourceCard readUrl={readUrl} source={source} onSource={(from) => takeSheet(from, 0)} />
-      {source && rows && mapping && reading && plan && (
+      {source && rows && mapping && reading && plan && merged && (
         <>
           <ColumnsCard
             source={source}
@@ -154,7 +172,6 @@ export function UploadRoster({
               setDecisions(new Map());
             }}
           />
-          <PreviewCard reading={reading} garments={roster.garments} ruleSet={roster.ruleSet} />
           {roster.players.length > 0 && (
             <Card title="How it meets the roster" aside={countOf(roster.players.length, 'player')}>
               <RadioGroup
@@ -165,12 +182,10 @@ export function UploadRoster({
                 onChange={(value) => setMode(value as MergeMode)}
                 options={mergeModes.map((value) => ({ value, ...modeWords[value] }))}
               />
-              {mode !== 'add' && (
-                <DoubtfulLines
-                  lines={plan.ambiguous}
-                  onDecide={(row, decision) => setDecisions(new Map([...decisions, [row, decision]]))}
-                />
-              )}
+              <DoubtfulLines
+                lines={plan.ambiguous}
+                onDecide={(row, decision) => setDecisions(new Map([...decisions, [row, decision]]))}
+              />
               {removed > 0 && (
                 <div className="mt-3">
                   <Notice tone="stop" title={`${countOf(removed, 'player')} will be removed`}>
@@ -180,6 +195,13 @@ export function UploadRoster({
               )}
             </Card>
           )}
+          <PreviewCard
+            reading={reading}
+            merged={merged}
+            before={roster.players}
+            garments={roster.garments}
+            ruleSet={roster.ruleSet}
+          />
           <FormFailure failure={failure} />
           <div className="flex flex-wrap items-center gap-4">
             <Button
@@ -191,9 +213,11 @@ export function UploadRoster({
                   ? 'No player could be read.'
                   : undecided > 0
                     ? `Say first who ${countOf(undecided, 'line')} ${undecided === 1 ? 'is' : 'are'}.`
-                    : work === 0
-                      ? 'The roster holds all of this already.'
-                      : undefined
+                    : merged.players.length > Math.max(mostPlayersPerRoster, roster.players.length)
+                      ? `A roster holds at most ${mostPlayersPerRoster} players, and this would make ${merged.players.length}. Keep the rows of one team.`
+                      : work === 0
+                        ? 'The roster holds all of this already.'
+                        : undefined
               }
             >
               Import {countOf(reading.lines.length, 'player')}
