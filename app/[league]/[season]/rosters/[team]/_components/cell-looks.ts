@@ -26,11 +26,14 @@ export function cardPlace(field: CellField): string {
   }
 }
 
+/** On paper a list is only a list. */
+const flat = 'true-colour print:bg-transparent print:shadow-none';
+
 /** A bar at the left and a wash, so that the colour is not the only sign. */
 export const severityLook: Record<Tone, string> = {
-  stop: 'true-colour bg-stop-wash shadow-[inset_3px_0_0_var(--stop)]',
-  care: 'true-colour bg-care-wash shadow-[inset_3px_0_0_var(--care)]',
-  note: 'true-colour bg-note-wash shadow-[inset_3px_0_0_var(--note)]',
+  stop: `${flat} bg-stop-wash shadow-[inset_3px_0_0_var(--stop)]`,
+  care: `${flat} bg-care-wash shadow-[inset_3px_0_0_var(--care)]`,
+  note: `${flat} bg-note-wash shadow-[inset_3px_0_0_var(--note)]`,
   set: '',
   wait: '',
 };

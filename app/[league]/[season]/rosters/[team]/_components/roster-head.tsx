@@ -70,7 +70,6 @@ export function RosterHead({
     const verdict = judge(step);
     return verdict.allowed ? undefined : verdict.reason;
   };
-  const offered = (step: RosterStep) => judge(step).allowed || state === fromState[step];
 
   /** Saves what waits, takes the step, and answers what went wrong. */
   const take = async <I,>(step: RosterStep, run: Step<StepInput & I>, more: I, done: string) => {
@@ -159,7 +158,7 @@ export function RosterHead({
                 Return with a reason
               </Button>
             )}
-            {may.submit && offered('submit') && (
+            {may.submit && isRosterEditable(state) && (
               <Button
                 look="primary"
                 pending={pending === 'submit'}
@@ -230,15 +229,6 @@ export function RosterHead({
     </>
   );
 }
-
-const fromState: Record<RosterStep, RosterPage['state'] | null> = {
-  submit: 'open',
-  withdraw: 'submitted',
-  return: 'submitted',
-  'sign off': 'submitted',
-  reopen: null,
-  freeze: 'signed off',
-};
 
 function describeFreeze(roster: RosterPage, today: Date, timeZone: string): string {
   const { frozenAt, division } = roster;

@@ -68,7 +68,7 @@ export function RosterToolbar({
           </button>
         ))}
         <p className="text-dusk min-w-0 grow basis-40 max-sm:order-5 max-sm:basis-full">{checkedAgainst}</p>
-        <div className="ml-auto flex items-center gap-0.5 max-sm:order-7">
+        <div className={joinClasses('ml-auto flex items-center gap-0.5', undo !== null && 'max-sm:order-7')}>
           {undo !== null && (
             <>
               <IconButton
@@ -94,7 +94,7 @@ export function RosterToolbar({
             onClick={() => onFindOpen(!findOpen)}
           />
         </div>
-        <div className="max-sm:order-6 max-sm:grow">{saveState}</div>
+        <div className="empty:hidden max-sm:order-6 max-sm:grow">{saveState}</div>
       </div>
       {findOpen && (
         <div className="border-hem flex flex-wrap items-center gap-3 border-t px-4 py-2.5">

@@ -32,7 +32,9 @@ export function RowMenu({
     ...(extra.length > 0
       ? [{ label: 'Also in the file', icon: 'file' as const, onSelect: () => setOpen(true) }]
       : []),
-    ...(editable && onPickNumber !== null ? [{ label: 'Pick a number', onSelect: onPickNumber }] : []),
+    ...(editable && onPickNumber !== null
+      ? [{ label: 'Pick a number', icon: 'edit' as const, onSelect: onPickNumber }]
+      : []),
     ...(editable
       ? [
           { label: 'Move up', icon: 'up' as const, disabled: !canMove.up, onSelect: () => onMove(-1) },

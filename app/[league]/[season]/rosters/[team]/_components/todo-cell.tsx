@@ -40,7 +40,12 @@ export function TodoCell({
           {onUse !== null && finding.suggestions.length > 0 && (
             <>
               {` ${leadOfSuggestions(finding)} `}
-              <span className="max-sm:flex max-sm:flex-wrap max-sm:gap-2 max-sm:pt-1.5">
+              <span
+                className={joinClasses(
+                  'max-sm:flex max-sm:flex-wrap max-sm:gap-2 max-sm:pt-1.5',
+                  finding.field === 'number' && 'sm:whitespace-nowrap',
+                )}
+              >
                 {finding.suggestions.map((value, place) => (
                   <span key={value}>
                     {place > 0 && (
