@@ -7,6 +7,7 @@ import { Table, Tbody, Td, Th, Thead, Tr } from '@/components/ui/table';
 import { StatusTag } from '@/components/ui/tag';
 import { TextLink } from '@/components/ui/text-link';
 import { formatDay, formatInstant } from '@/lib/domain/dates/format';
+import { toDay } from '@/lib/domain/dates/zone';
 import { countOf } from '@/lib/domain/text/count-of';
 import { listSeasons } from '@/lib/use-cases/seasons/list-seasons';
 import { paths } from '@/lib/web/paths';
@@ -21,6 +22,7 @@ export default async function SeasonsPage({ params }: { params: Promise<{ league
   const { league } = await params;
   const { ctx } = await requireLeague(league, paths.seasons(league));
   const seasons = await showNotFound(listSeasons(ctx));
+  const year = Number(toDay(ctx.now, ctx.league.timeZone).slice(0, 4));
   const open = (
     <ButtonLink look="primary" href={paths.newSeason(league)}>
       Open a season
@@ -64,8 +66,8 @@ export default async function SeasonsPage({ params }: { params: Promise<{ league
                   <Td label="Teams" end>
                     {season.teams}
                   </Td>
-                  <Td label="Rosters freeze">{formatInstant(season.freezesAt, ctx.league.timeZone)}</Td>
-                  <Td label="First match">{formatDay(season.firstMatchOn)}</Td>
+                  <Td label="Rosters freeze">{formatInstant(season.freezesAt, ctx.league.timeZone, year)}</Td>
+                  <Td label="First match">{formatDay(season.firstMatchOn, year)}</Td>
                   <Td label="">
                     {season.isCurrent ? (
                       <StatusTag tone="set">current</StatusTag>

@@ -15,20 +15,30 @@ const sizes = [
   ['L', 'Adult large'],
   ['XL', 'Adult extra large'],
   ['2XL', 'Adult double extra large'],
+  ['3XL', 'Adult triple extra large'],
 ].map(([code = '', label = '']) => ({ code, label }));
+
+/** Socks come in far fewer sizes than shirts (common practice, no source; the shoe sizes differ from maker to maker). */
+const sockSizes = [
+  { code: 'YS', label: 'Youth small' },
+  { code: 'YL', label: 'Youth large' },
+  { code: 'S', label: 'Adult small' },
+  { code: 'L', label: 'Adult large' },
+];
 
 const garment = (
   code: string,
   name: string,
   worn: Garment['worn'],
   printed: { numbered: boolean; named: boolean },
-): Garment => ({ code, name, worn, ...printed, sizes });
+  offered: Garment['sizes'] = sizes,
+): Garment => ({ code, name, worn, ...printed, sizes: offered });
 
 const both = { numbered: true, named: true };
 const plain = { numbered: false, named: false };
 const shorts = garment('shorts', 'Shorts', 'home and away', plain);
 
-/** The kits a newcomer can start from. */
+/** The kits a newcomer can start from: our own defaults, all of them to be changed. */
 export const starterKits: readonly StarterKit[] = [
   {
     id: 'jersey-and-shorts',
@@ -44,6 +54,16 @@ export const starterKits: readonly StarterKit[] = [
       garment('home-jersey', 'Home jersey', 'home', both),
       garment('away-jersey', 'Away jersey', 'away', both),
       shorts,
+    ],
+  },
+  {
+    id: 'shirt-shorts-and-socks',
+    name: 'Shirt, shorts and socks',
+    says: 'A shirt and shorts with a number, socks without; a name on the shirt only',
+    garments: [
+      garment('shirt', 'Shirt', 'home and away', both),
+      garment('shorts', 'Shorts', 'home and away', { numbered: true, named: false }),
+      garment('socks', 'Socks', 'home and away', plain, sockSizes),
     ],
   },
   {

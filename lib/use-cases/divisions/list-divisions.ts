@@ -1,6 +1,6 @@
 import { listDivisionViews } from '@/db/queries/division-view';
 import { countByDivision } from '@/db/queries/divisions';
-import { listRuleSets } from '@/db/queries/rule-sets';
+import { listRuleSets, listRuleSetVersions } from '@/db/queries/rule-sets';
 import { findSeasonBySlug } from '@/db/queries/season-view';
 import { withLeague } from '@/db/tenant';
 import { can } from '@/lib/domain/access/permissions';
@@ -30,13 +30,27 @@ export async function listDivisions(ctx: ActorContext, input: { season: string }
   });
 }
 
-/** What the form of a division needs: the division (undefined for a new one) and the rule sets to pick from. */
+/**
+ * What the form of a division needs: the division (undefined for a new one) and the rule sets to pick from, each with
+ * the version in force if there is one.
+ */
 export async function getDivisionForm(ctx: ActorContext, input: { season: string; division: string | null }) {
   assertCan(ctx.actor, 'division.write');
   return withLeague(ctx.league.id, async (tx) => {
     const season = await findSeasonBySlug(tx, input.season);
     if (!season) throw notFound('season');
-    const ruleSets = (await listRuleSets(tx)).map(({ id, name }) => ({ id, name }));
+    const known = await listRuleSets(tx);
+    const inForce = (
+      await listRuleSetVersions(
+        tx,
+        known.map((entry) => entry.id),
+      )
+    ).filter((version) => version.state === 'in force');
+    const ruleSets = known.map(({ id, name }) => ({
+      id,
+      name,
+      rules: inForce.find((version) => version.ruleSetId === id)?.ruleSet ?? null,
+    }));
     if (input.division === null) return { season, ruleSets, division: undefined, teams: 0 };
     const division = (await listDivisionViews(tx, season.id)).find((entry) => entry.slug === input.division);
     if (!division) throw notFound('division');

@@ -1,4 +1,8 @@
 import { beforeAll, describe, expect, it } from 'vitest';
+import { planTeams } from '@/app/[league]/[season]/teams/import/_components/plan-teams';
+import { parseTable } from '@/lib/domain/roster/import/parse-table';
+import { readTeams } from '@/lib/domain/roster/import/read-teams';
+import { guessTeamMapping } from '@/lib/domain/roster/import/team-mapping';
 import { addTeam } from '@/lib/use-cases/teams/add-team';
 import { changeTeam } from '@/lib/use-cases/teams/change-team';
 import { exportTeams } from '@/lib/use-cases/teams/export-teams';
@@ -220,6 +224,45 @@ describe('importing teams', () => {
         }),
     );
     expect(outcome).toEqual({ status: 'fulfilled', value: { added: 1, changed: 1, unchanged: 0 } });
+  });
+});
+
+describe('a list of teams', () => {
+  const plan = async (csv: string) => {
+    const { teams, divisions } = await listTeams(world.admin, { season: world.season.slug });
+    const parsed = parseTable(csv);
+    if (!parsed.ok) throw new Error(parsed.message);
+    const reading = readTeams(parsed.table.rows, guessTeamMapping(parsed.table.rows), divisions);
+    return { planned: planTeams(reading.lines, teams), refused: reading.refused, teams };
+  };
+
+  it('that was exported changes no team when it comes in again', async () => {
+    const division = await buildDivision(world.league, world.season, { name: 'Ü10; "Mixed", A' });
+    await buildTeam(world.league, division, { name: '=Sum, the "Owls"', kits: { home: red, away: someKit } });
+    await buildTeam(world.league, division, {
+      name: 'O’Neill’s 鷺',
+      kits: { home: { ...red, number: '#ffd700', sleeves: '#000000', outline: '#000000' }, away: null },
+    });
+    const { csv } = await exportTeams(world.admin, { season: world.season.slug });
+    const { planned, refused, teams } = await plan(csv);
+    expect(refused).toEqual([]);
+    expect(planned).toHaveLength(teams.length);
+    expect(new Set(planned.map((team) => team.fate))).toEqual(new Set(['unchanged']));
+  });
+
+  it('that names no colour for the numbers leaves theirs as it is', async () => {
+    const division = await buildDivision(world.league, world.season, { name: 'Numbered' });
+    const gold = { ...someKit, number: '#ffd700' };
+    await buildTeam(world.league, division, { name: 'Gilded', kits: { home: gold, away: null } });
+    const csv =
+      'Team,Division,Home colour\nGilded,Numbered,navy (#14375e)\nGilded,numbered,red\nPlain,Numbered,#b01f24\n';
+    const { planned, refused } = await plan(csv);
+    expect(planned.map(({ name, fate, home }) => [name, fate, home?.number])).toEqual([
+      ['Gilded', 'unchanged', '#ffd700'],
+      ['Plain', 'added', '#ffffff'],
+    ]);
+    // Every row is accounted for: the second Gilded is refused with its reason.
+    expect(refused.map((row) => row.rowNumber)).toEqual([3]);
   });
 });
 

@@ -13,6 +13,7 @@ import { fileLimits } from '@/lib/domain/roster/import/limits';
 import { readRoster } from '@/lib/domain/roster/import/read-roster';
 import type { CheckSummary, Finding } from '@/lib/domain/rules/finding';
 import { countOf } from '@/lib/domain/text/count-of';
+import { sayHowKnown, writeCitation } from '@/lib/domain/rules/write-citation';
 import { CheckResult } from './check-result';
 import type { Checked, CheckPreset } from './checked';
 import { readFile, readPaste, type Reading, type ReadWorkbook } from './read-file';
@@ -120,8 +121,7 @@ export function RosterCheckForm({
               <div className="type-small text-dusk grid gap-2">
                 {preset.citations.slice(0, 3).map((citation) => (
                   <p key={`${citation.document} ${citation.rule}`}>
-                    {citation.body}, {citation.document}, {citation.edition}, {citation.rule} (
-                    {citation.known})
+                    {writeCitation(citation)} ({sayHowKnown(citation.known)})
                   </p>
                 ))}
                 <p>{preset.checkYourBook}</p>

@@ -20,25 +20,29 @@ export default async function DatesPage({ params }: { params: Promise<{ league: 
   const { season, mayChange } = await showNotFound(getSeason(ctx, { season: slug }));
   const { timeZone } = ctx.league;
   const today = toDay(ctx.now, timeZone);
+  const year = Number(today.slice(0, 4));
   return (
     <>
       <PageHeader
         title="Dates"
-        subtitle={`${season.name}: rosters freeze ${formatInstant(season.freezesAt, timeZone)}, hand-out ${formatDay(season.handOutOn)}.`}
+        subtitle={`${season.name}: rosters freeze ${formatInstant(season.freezesAt, timeZone, year)}, hand-out ${formatDay(season.handOutOn, year)}.`}
       />
-      <Card title="Date plan" className="mb-5">
-        <DatePlan
-          label="Dates of the season"
-          dates={listPlanDates(season, timeZone, today)}
-          today={today}
-          todayLabel={`today, ${formatShortDay(today)}`}
-        />
-      </Card>
+      {!mayChange && (
+        <Card title="Date plan">
+          <DatePlan
+            label="Dates of the season"
+            dates={listPlanDates(season, timeZone, today)}
+            today={today}
+            todayLabel={`today, ${formatShortDay(today)}`}
+          />
+        </Card>
+      )}
       {mayChange && (
         <SeasonForm
           key={season.rowVersion}
           league={league}
           timeZone={timeZone}
+          today={today}
           season={{ id: season.id, slug: season.slug, rowVersion: season.rowVersion }}
           onOpen={null}
           onChange={changeSeasonAction}

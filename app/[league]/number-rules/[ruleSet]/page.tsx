@@ -8,6 +8,7 @@ import { Tag } from '@/components/ui/tag';
 import { BackLink } from '@/components/ui/text-link';
 import { formatDay } from '@/lib/domain/dates/format';
 import { buildNumberRail } from '@/lib/domain/numbers/number-rail';
+import { sayHowKnown, writeCitation } from '@/lib/domain/rules/write-citation';
 import { describeRuleSet } from '@/lib/domain/rules/describe-rule-set';
 import { getRuleSet, type RuleSetDetail } from '@/lib/use-cases/rule-sets/get-rule-set';
 import { paths } from '@/lib/web/paths';
@@ -111,8 +112,7 @@ function Citations({ ruleSet }: { ruleSet: Version['ruleSet'] }) {
           <ul className="grid gap-2">
             {ruleSet.citations.map((citation) => (
               <li key={`${citation.document} ${citation.edition} ${citation.rule}`}>
-                {citation.body}, {citation.document}, {citation.edition}, {citation.rule}{' '}
-                <Tag>{citation.known}</Tag>
+                {writeCitation(citation)} <Tag>{sayHowKnown(citation.known)}</Tag>
               </li>
             ))}
           </ul>

@@ -10,6 +10,7 @@ import { SearchInput } from '@/components/ui/search-input';
 import { Tag } from '@/components/ui/tag';
 import { TextInput } from '@/components/ui/text-input';
 import type { PresetCitation } from '@/lib/domain/rules/catalogue/catalogue-preset';
+import { sayHowKnown, writeCitation } from '@/lib/domain/rules/write-citation';
 import type { ActionResult } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 
@@ -179,11 +180,9 @@ function Citations({ preset }: { preset: Preset }) {
         {preset.citations.map((citation) => (
           <li key={`${citation.document} ${citation.rule} ${citation.says}`} className="grid gap-0.5">
             <span>
-              {citation.says} <Tag>{citation.known}</Tag>
+              {citation.says} <Tag>{sayHowKnown(citation.known)}</Tag>
             </span>
-            <span className="type-small text-dusk">
-              {citation.body}, {citation.document}, {citation.edition}, {citation.rule}
-            </span>
+            <span className="type-small text-dusk">{writeCitation(citation)}</span>
           </li>
         ))}
       </ul>

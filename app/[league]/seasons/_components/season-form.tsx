@@ -4,10 +4,17 @@ import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { FormFailure } from '@/app/_components/form-failure';
 import { useSubmit } from '@/app/_components/use-submit';
+import { DatePlan } from '@/components/date-plan/date-plan';
 import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { TextField } from '@/components/ui/field';
 import { useToast } from '@/components/ui/toast';
+import { daysBetween, isDay } from '@/lib/domain/dates/day';
+import { formatShortDay, formatTime } from '@/lib/domain/dates/format';
+import { listSeasonFaults } from '@/lib/domain/dates/list-season-faults';
+import { listPlanDates } from '@/lib/domain/dates/plan-dates';
+import { localDateTimeSchema, toInstant } from '@/lib/domain/dates/zone';
+import { countOf } from '@/lib/domain/text/count-of';
 import type { ActionResult } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 
@@ -22,11 +29,34 @@ export type SeasonValues = {
 };
 type Sent = Omit<SeasonValues, 'releaseOn'> & { releaseOn: string | null };
 
-/** The name and the dates of a season; for a new one and for one that is there. Entries stay on every failure. */
+/** The dates as typed, read on the league's clocks; null while one of them is no date yet. */
+function readDates(values: SeasonValues, timeZone: string) {
+  const { rosterOpensOn, handOutOn, firstMatchOn } = values;
+  const releaseOn = values.releaseOn === '' ? null : values.releaseOn;
+  const days = [rosterOpensOn, handOutOn, firstMatchOn, ...(releaseOn === null ? [] : [releaseOn])];
+  if (!days.every(isDay) || !localDateTimeSchema.safeParse(values.freezesAt).success) return null;
+  const { instant, note } = toInstant(values.freezesAt, timeZone);
+  return { rosterOpensOn, handOutOn, firstMatchOn, releaseOn, freezesAt: instant, note };
+}
+
+/** What the typed freeze means where clocks change that night; null on every other day of the year. */
+function sayClockChange(dates: ReturnType<typeof readDates>, timeZone: string): string | null {
+  if (dates?.note === 'skipped hour')
+    return `Clocks go forward over that hour: rosters freeze at ${formatTime(dates.freezesAt, timeZone)}.`;
+  if (dates?.note === 'repeated hour')
+    return 'Clocks go back and that hour comes twice: the first one counts.';
+  return null;
+}
+
+/**
+ * The name and the dates of a season, with the date plan drawn as they are typed; for a new one and for one that is
+ * there. Entries stay on every failure. `today` is the league's calendar day.
+ */
 export function SeasonForm({
   league,
   start,
   timeZone,
+  today,
   season,
   onOpen,
   onChange,
@@ -34,6 +64,7 @@ export function SeasonForm({
   league: string;
   start: SeasonValues;
   timeZone: string;
+  today: string;
   season: { id: string; slug: string; rowVersion: number } | null;
   onOpen: ((league: string, input: Sent) => Promise<ActionResult<{ slug: string }>>) | null;
   onChange:
@@ -63,45 +94,74 @@ export function SeasonForm({
     if (!season) router.push(paths.dates(league, slug));
     router.refresh();
   });
+  const freezeOn = values.freezesAt.slice(0, 10);
+  const { freezeOn: freezesAt, ...faults } = listSeasonFaults({ ...values, freezeOn });
+  const live: Partial<Record<keyof SeasonValues, string>> = { ...faults, ...(freezesAt && { freezesAt }) };
+  const dates = readDates(values, timeZone);
   const bind = (name: keyof SeasonValues) => ({
     name,
     value: values[name],
     onChange: (event: { target: { value: string } }) => setValues({ ...values, [name]: event.target.value }),
-    error: errors[name] ?? errors[`fields.${name}`],
+    error: live[name] ?? errors[name] ?? errors[`fields.${name}`],
   });
   return (
     <form
       noValidate
+      className="grid gap-5"
       onSubmit={(event) => {
         event.preventDefault();
         void submit();
       }}
     >
-      <Card title="Dates and name" aside={`clocks of ${timeZone.replaceAll('_', ' ')}`}>
+      <Card title="Date plan" aside={dates && sayGaps(dates.rosterOpensOn, freezeOn, dates.handOutOn)}>
+        {dates ? (
+          <DatePlan
+            label="Dates of the season"
+            dates={listPlanDates(dates, timeZone, today)}
+            today={today}
+            todayLabel={`today, ${formatShortDay(today)}`}
+          />
+        ) : (
+          <p className="text-dusk">Fill every date in below to see them on one line.</p>
+        )}
+      </Card>
+      <Card title="Dates" aside={`on the clocks of ${timeZone.replaceAll('_', ' ')}`}>
         <div className="grid gap-4 sm:grid-cols-2 lg:grid-cols-3">
-          <TextField label="Name" required maxLength={80} {...bind('name')} hint="Such as Spring 2027." />
-          <TextField label="Sport" required maxLength={60} {...bind('sport')} />
           <TextField label="Rosters open" type="date" required {...bind('rosterOpensOn')} />
           <TextField
             label="Rosters freeze"
             type="datetime-local"
             required
             {...bind('freezesAt')}
-            hint="Signed-off rosters freeze at this moment; later changes need a reason."
+            hint={
+              sayClockChange(dates, timeZone) ??
+              'Signed-off rosters freeze at this moment; later changes need a reason.'
+            }
           />
           <TextField label="Release to the decorator" type="date" required={false} {...bind('releaseOn')} />
           <TextField label="Hand-out day" type="date" required {...bind('handOutOn')} />
           <TextField label="First match" type="date" required {...bind('firstMatchOn')} />
         </div>
-        <div className="mt-5 grid gap-3">
-          <FormFailure failure={failure} />
-          <div>
-            <Button type="submit" look="primary" pending={pending}>
-              {season ? 'Save the season' : 'Open the season'}
-            </Button>
-          </div>
+      </Card>
+      <Card title="Name">
+        <div className="grid gap-4 sm:grid-cols-2 lg:grid-cols-3">
+          <TextField label="Name" required maxLength={80} {...bind('name')} hint="Such as Spring 2027." />
+          <TextField label="Sport" required maxLength={60} {...bind('sport')} />
         </div>
       </Card>
+      <FormFailure failure={failure} />
+      <div>
+        <Button type="submit" look="primary" pending={pending}>
+          {season ? 'Save the season' : 'Open the season'}
+        </Button>
+      </div>
     </form>
   );
+}
+
+/** How long families and the shop have, once the days follow each other. */
+function sayGaps(opens: string, freezes: string, handOut: string): string | null {
+  const [collect, make] = [daysBetween(opens, freezes), daysBetween(freezes, handOut)];
+  if (collect < 1 || make < 1) return null;
+  return `${countOf(collect, 'day')} to collect, ${countOf(make, 'day')} to make and ship`;
 }

@@ -16,7 +16,8 @@ export default async function NewSeasonPage({ params }: { params: Promise<{ leag
   const { league } = await params;
   const { ctx } = await requireLeague(league, paths.newSeason(league));
   const [latest] = await showNotFound(listSeasons(ctx));
-  const days = suggestSeasonDays(toDay(ctx.now, ctx.league.timeZone));
+  const today = toDay(ctx.now, ctx.league.timeZone);
+  const days = suggestSeasonDays(today);
   return (
     <>
       <PageHeader
@@ -27,6 +28,7 @@ export default async function NewSeasonPage({ params }: { params: Promise<{ leag
       <SeasonForm
         league={league}
         timeZone={ctx.league.timeZone}
+        today={today}
         season={null}
         onOpen={openSeasonAction}
         onChange={null}

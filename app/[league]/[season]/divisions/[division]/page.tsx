@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import { PageHeader } from '@/components/ui/page-header';
 import { BackLink } from '@/components/ui/text-link';
+import { formatInstant } from '@/lib/domain/dates/format';
 import { toLocalInput } from '@/lib/domain/dates/zone';
 import { countOf } from '@/lib/domain/text/count-of';
 import { notFound } from '@/lib/platform/errors';
@@ -18,7 +19,8 @@ type Props = { params: Promise<{ league: string; season: string; division: strin
 export default async function DivisionPage({ params }: Props) {
   const { league, season, division: slug } = await params;
   const { ctx } = await requireLeague(league, paths.division(league, season, slug));
-  const { ruleSets, division, teams } = await showNotFound(getDivisionForm(ctx, { season, division: slug }));
+  const found = await showNotFound(getDivisionForm(ctx, { season, division: slug }));
+  const { ruleSets, division, teams, season: dates } = found;
   if (!division) return showNotFound(Promise.reject(notFound('division')));
   return (
     <>
@@ -32,6 +34,7 @@ export default async function DivisionPage({ params }: Props) {
         league={league}
         season={season}
         ruleSets={ruleSets}
+        seasonFreezes={formatInstant(dates.freezesAt, ctx.league.timeZone)}
         division={{ id: division.id, name: division.name, rowVersion: division.rowVersion, teams }}
         start={{
           name: division.name,

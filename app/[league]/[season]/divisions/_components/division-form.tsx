@@ -13,6 +13,10 @@ import { TextLink } from '@/components/ui/text-link';
 import { useToast } from '@/components/ui/toast';
 import { makeUniqueSlug } from '@/lib/domain/league/slug';
 import type { Garment } from '@/lib/domain/roster/player';
+import { applyDivisionLimits } from '@/lib/domain/rules/apply-division-limits';
+import { describeRuleSet } from '@/lib/domain/rules/describe-rule-set';
+import type { RuleSet } from '@/lib/domain/rules/rule-set';
+import { countOf } from '@/lib/domain/text/count-of';
 import type { DivisionInput } from '@/lib/use-cases/divisions/division-schemas';
 import type { ActionResult } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
@@ -29,10 +33,14 @@ export type DivisionValues = {
   garments: Garment[];
 };
 
+type RuleChoice = { id: string; name: string; rules: RuleSet | null };
+
 type Props = {
   league: string;
   season: string;
-  ruleSets: { id: string; name: string }[];
+  ruleSets: RuleChoice[];
+  /** When rosters freeze where the division has no freeze of its own. */
+  seasonFreezes: string;
   division: { id: string; name: string; rowVersion: number; teams: number } | null;
   start: DivisionValues;
   onAdd:
@@ -53,12 +61,17 @@ type Props = {
 
 const toCount = (text: string): number => (/^\d+$/.test(text.trim()) ? Number(text) : Number.NaN);
 
-/** A new garment gets its short name from what it is called when it is first saved; rosters know it by that ever after. */
-function nameGarments(garments: readonly Garment[]): Garment[] {
-  const taken = new Set(garments.map((garment) => garment.code));
+/**
+ * A new garment gets its short name from what it is called when it is first saved; rosters know it by that ever after,
+ * so one that was `saved` keeps its own whatever it is called now.
+ */
+function nameGarments(garments: readonly Garment[], saved: readonly Garment[]): Garment[] {
+  const kept = new Set(saved.map((garment) => garment.code));
+  const taken = new Set([...kept, ...garments.map((garment) => garment.code)]);
   return garments.map((garment) => {
-    if (!/^new-\d+$/.test(garment.code) || garment.name.trim() === '') return garment;
-    const code = makeUniqueSlug(`${garment.name.slice(0, 30)}`, 'garment', taken);
+    if (kept.has(garment.code) || !/^new-\d+$/.test(garment.code) || garment.name.trim() === '')
+      return garment;
+    const code = makeUniqueSlug(garment.name.slice(0, 30), 'garment', taken);
     if (!/^[a-z]/.test(code)) return garment;
     taken.add(code);
     return { ...garment, code };
@@ -70,6 +83,7 @@ export function DivisionForm({
   league,
   season,
   ruleSets,
+  seasonFreezes,
   division,
   start,
   onAdd,
@@ -83,7 +97,7 @@ export function DivisionForm({
   const send = async (): Promise<ActionResult<unknown>> => {
     const fields = {
       ...values,
-      garments: nameGarments(values.garments),
+      garments: nameGarments(values.garments, division ? start.garments : []),
       leastPlayers: toCount(values.leastPlayers),
       mostPlayers: toCount(values.mostPlayers),
       freezesAt: values.freezesAt === '' ? null : values.freezesAt,
@@ -145,7 +159,7 @@ export function DivisionForm({
             type="datetime-local"
             required={false}
             {...bind('freezesAt')}
-            hint="Empty: rosters freeze with the season."
+            hint={`Empty: with the season, ${seasonFreezes}.`}
           />
         </div>
       </Card>
@@ -156,13 +170,21 @@ export function DivisionForm({
             then come back.
           </Notice>
         ) : (
-          <div className="sm:max-w-100">
+          <div className="grid gap-x-8 gap-y-4 lg:grid-cols-[minmax(0,1fr)_minmax(0,2fr)]">
             <SelectField
               label="Plays by"
               required
               placeholder="Pick a rule set"
               options={ruleSets.map((ruleSet) => ({ value: ruleSet.id, label: ruleSet.name }))}
               {...bind('ruleSetId')}
+            />
+            <RulesInWords
+              league={league}
+              choice={ruleSets.find((ruleSet) => ruleSet.id === values.ruleSetId)}
+              limits={{
+                leastPlayers: toCount(values.leastPlayers) || 0,
+                mostPlayers: toCount(values.mostPlayers) || 0,
+              }}
             />
           </div>
         )}
@@ -187,7 +209,7 @@ export function DivisionForm({
                 look="danger"
                 unavailable={
                   division.teams > 0
-                    ? `It has ${division.teams} teams. Move or remove them first.`
+                    ? `It has ${countOf(division.teams, 'team')}. Move or remove ${division.teams === 1 ? 'it' : 'them'} first.`
                     : undefined
                 }
               >
@@ -195,10 +217,39 @@ export function DivisionForm({
               </Button>
             }
           >
-            Its limits and {division.teams === 0 ? 'garments' : 'teams'} are lost. The number rules stay.
+            Its limits and garments are lost. The number rules stay.
           </ConfirmDialog>
         )}
       </div>
     </form>
+  );
+}
+
+/** What the chosen rules say of a roster of this division, with the limits as typed. */
+function RulesInWords({
+  league,
+  choice,
+  limits,
+}: {
+  league: string;
+  choice: RuleChoice | undefined;
+  limits: { leastPlayers: number; mostPlayers: number };
+}) {
+  if (!choice)
+    return <p className="text-dusk self-center">What they say stands here once they are chosen.</p>;
+  if (choice.rules === null) {
+    return (
+      <Notice tone="care" title={`${choice.name} is not in force yet`}>
+        Rosters are not checked until{' '}
+        <TextLink href={paths.numberRuleSet(league, choice.id)}>a version of it is in force</TextLink>.
+      </Notice>
+    );
+  }
+  return (
+    <ul className="list-disc pl-5" aria-label={`What ${choice.name} says`}>
+      {describeRuleSet(applyDivisionLimits(choice.rules, limits)).map((sentence) => (
+        <li key={sentence}>{sentence}</li>
+      ))}
+    </ul>
   );
 }

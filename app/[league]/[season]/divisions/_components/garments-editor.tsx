@@ -1,13 +1,16 @@
 'use client';
 
+import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { Checkbox } from '@/components/ui/checkbox';
 import { FieldError, SelectField, TextField } from '@/components/ui/field';
 import { IconButton } from '@/components/ui/icon-button';
 import { Menu } from '@/components/ui/menu';
+import { useToast } from '@/components/ui/toast';
 import { starterKits } from '@/lib/domain/kit/starter-kits';
 import type { Garment } from '@/lib/domain/roster/player';
+import { countOf } from '@/lib/domain/text/count-of';
 
 const worn = [
   { value: 'home', label: 'with the home kit' },
@@ -19,6 +22,7 @@ const worn = [
 const writeSizes = (sizes: Garment['sizes']): string =>
   sizes.map(({ code, label }) => (label === code ? code : `${code} = ${label}`)).join(', ');
 
+/** The reverse; what stands between two commas and has no code is left out. */
 const readSizes = (text: string): Garment['sizes'] =>
   text
     .split(',')
@@ -36,6 +40,7 @@ export function GarmentsEditor({
   errors: Record<string, string>;
   onChange: (garments: Garment[]) => void;
 }) {
+  const showToast = useToast();
   const set = (index: number, part: Partial<Garment>) =>
     onChange(garments.map((garment, at) => (at === index ? { ...garment, ...part } : garment)));
   const move = (index: number, by: number) => {
@@ -78,7 +83,15 @@ export function GarmentsEditor({
             {
               items: starterKits.map((kit) => ({
                 label: kit.name,
-                onSelect: () => onChange([...kit.garments]),
+                hint: kit.says,
+                onSelect: () => {
+                  onChange([...kit.garments]);
+                  showToast({
+                    tone: 'set',
+                    title: `${kit.name}: ${countOf(kit.garments.length, 'garment')}, not saved yet`,
+                    action: { label: 'Undo', onSelect: () => onChange([...garments]) },
+                  });
+                },
               })),
             },
           ]}
@@ -124,13 +137,10 @@ export function GarmentsEditor({
                 />
               </span>
             </div>
-            <TextField
-              label="Sizes, smallest first"
-              required
-              defaultValue={writeSizes(garment.sizes)}
+            <SizesField
+              sizes={garment.sizes}
               error={errorOf(index, 'sizes')}
-              hint="Codes with commas; words behind an equals sign: YS = Youth small, YM = Youth medium."
-              onChange={(event) => set(index, { sizes: readSizes(event.target.value) })}
+              onChange={(sizes) => set(index, { sizes })}
             />
             <div className="flex flex-wrap gap-x-6">
               <Checkbox
@@ -154,5 +164,32 @@ export function GarmentsEditor({
         </div>
       </div>
     </Card>
+  );
+}
+
+/** The sizes as one line of text, which stays as typed while it says the same sizes. */
+function SizesField({
+  sizes,
+  error,
+  onChange,
+}: {
+  sizes: Garment['sizes'];
+  error: string | undefined;
+  onChange: (sizes: Garment['sizes']) => void;
+}) {
+  const [typed, setTyped] = useState(writeSizes(sizes));
+  const same = JSON.stringify(readSizes(typed)) === JSON.stringify(sizes);
+  return (
+    <TextField
+      label="Sizes, smallest first"
+      required
+      value={same ? typed : writeSizes(sizes)}
+      error={error}
+      hint={`${countOf(sizes.length, 'size')}. Codes with commas; words behind an equals sign: YS = Youth small, YM = Youth medium.`}
+      onChange={(event) => {
+        setTyped(event.target.value);
+        onChange(readSizes(event.target.value));
+      }}
+    />
   );
 }

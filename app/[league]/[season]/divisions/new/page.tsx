@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import { PageHeader } from '@/components/ui/page-header';
 import { BackLink } from '@/components/ui/text-link';
+import { formatInstant } from '@/lib/domain/dates/format';
 import { starterKits } from '@/lib/domain/kit/starter-kits';
 import { getDivisionForm } from '@/lib/use-cases/divisions/list-divisions';
 import { paths } from '@/lib/web/paths';
@@ -18,7 +19,7 @@ export default async function NewDivisionPage({
 }) {
   const { league, season } = await params;
   const { ctx } = await requireLeague(league, paths.newDivision(league, season));
-  const { ruleSets } = await showNotFound(getDivisionForm(ctx, { season, division: null }));
+  const { ruleSets, season: dates } = await showNotFound(getDivisionForm(ctx, { season, division: null }));
   return (
     <>
       <PageHeader
@@ -29,6 +30,7 @@ export default async function NewDivisionPage({
         league={league}
         season={season}
         ruleSets={ruleSets}
+        seasonFreezes={formatInstant(dates.freezesAt, ctx.league.timeZone)}
         division={null}
         start={{
           name: '',

@@ -120,6 +120,7 @@ export function TeamForm({
           title="Away kit"
           aside={
             <Checkbox
+              className="-my-2.5"
               label="Has an away kit"
               checked={values.away !== null}
               onChange={(event) => {

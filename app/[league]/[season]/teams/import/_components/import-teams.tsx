@@ -24,7 +24,12 @@ import { paths } from '@/lib/web/paths';
 import { planTeams } from './plan-teams';
 import { TeamPlanTable } from './team-plan-table';
 
-type Sheet = { name: string; rows: string[][]; notes: string[] };
+type Sheet = {
+  name: string;
+  rows: string[][];
+  notes: string[];
+  problems: { rowNumber: number; message: string }[];
+};
 type Sent = {
   season: string;
   teams: { name: string; divisionId: string; home: Kit | null; away: Kit | null }[];
@@ -84,7 +89,8 @@ export function ImportTeams({
   const readPaste = () => {
     const parsed = parseTable(text);
     if (!parsed.ok) return setRefusal(parsed.message);
-    take([{ name: 'your paste', rows: parsed.table.rows, notes: parsed.table.notes }]);
+    const { rows: cells, notes, problems } = parsed.table;
+    take([{ name: 'your paste', rows: cells, notes, problems }]);
   };
   const readFile = async (picked: File | null) => {
     setFile(picked);
@@ -109,6 +115,12 @@ export function ImportTeams({
     const taken = readTeams(rows, mapping, divisions);
     return { reading: taken, teams: planTeams(taken.lines, known) };
   }, [rows, mapping, divisions, known]);
+  // Everything the reading has to say: of the file, of single rows, of the list as a whole.
+  const said = [
+    ...(sheets[sheet]?.notes ?? []),
+    ...(sheets[sheet]?.problems ?? []).map((problem) => `Row ${problem.rowNumber}: ${problem.message}`),
+    ...(plan?.reading.notes ?? []),
+  ];
   const toSend = plan?.teams.filter((team) => team.fate !== 'twice') ?? [];
   const count = (fate: string) => plan?.teams.filter((team) => team.fate === fate).length ?? 0;
   const refused = (plan?.reading.refused.length ?? 0) + count('twice');
@@ -225,9 +237,9 @@ export function ImportTeams({
                 />
               ))}
             </div>
-            {plan.reading.notes.length > 0 && (
+            {said.length > 0 && (
               <ul className="text-dusk type-small mt-3 list-disc pl-5">
-                {plan.reading.notes.map((note) => (
+                {said.map((note) => (
                   <li key={note}>{note}</li>
                 ))}
               </ul>

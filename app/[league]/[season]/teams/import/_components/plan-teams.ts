@@ -1,6 +1,6 @@
 import type { Kit, TeamKits } from '@/lib/domain/kit/kit';
 import { makeKitOfColours } from '@/lib/domain/kit/kit-of-colours';
-import type { TeamsReading } from '@/lib/domain/roster/import/read-teams';
+import type { TeamLine, TeamsReading } from '@/lib/domain/roster/import/read-teams';
 
 export type PlannedTeam = {
   rowNumber: number;
@@ -21,17 +21,27 @@ const differs = (known: Kit | null, incoming: Kit | null): boolean =>
   incoming !== null &&
   (known?.body.toLowerCase() !== incoming.body ||
     known.name !== incoming.name ||
-    known.number.toLowerCase() !== incoming.number);
+    known.number.toLowerCase() !== incoming.number.toLowerCase());
+
+/**
+ * A kit of the list as it would be worn. Where the list names no colour for the number, a team that keeps its body
+ * colour keeps its number's too.
+ */
+function readKit(line: TeamLine['home'], known: Kit | null | undefined): Kit | null {
+  if (!line) return null;
+  const kept = known && known.body.toLowerCase() === line.colour.hex ? { name: '', hex: known.number } : null;
+  return makeKitOfColours(line.colour, line.number ?? kept);
+}
 
 /** What an import would do with each team of a list; a team that stands twice in one division is only taken once. */
 export function planTeams(lines: TeamsReading['lines'], known: readonly Known[]): PlannedTeam[] {
   const byKey = new Map(known.map((team) => [keyOf(team), team]));
   const seen = new Set<string>();
   return lines.map(({ rowNumber, line, notes }) => {
-    const home = line.home && makeKitOfColours(line.home.colour, line.home.number);
-    const away = line.away && makeKitOfColours(line.away.colour, line.away.number);
     const key = keyOf(line);
     const twin = byKey.get(key);
+    const home = readKit(line.home, twin?.kits.home);
+    const away = readKit(line.away, twin?.kits.away);
     const fate = seen.has(key)
       ? 'twice'
       : !twin
