@@ -46,5 +46,21 @@ test('a newcomer opens an account by e-mail and creates a league with its first 
   await page.waitForURL(/\/leagues/);
   await page.goto('/leagues/new');
   await expectAccessible(page);
+  const next = page
+    .locator('form')
+    .getByRole('button', { name: /next|go on|create|league|season|division/i })
+    .last();
+  await page.getByLabel('Name of the league').fill('Harbour Netball');
+  await next.click();
+  await page.getByLabel('Name of the season').fill('Spring 2027');
+  await page.getByLabel('Sport').fill('netball');
+  await next.click();
+  await page.getByLabel('Name of the division').fill('Under 13');
+  await next.click();
+  await page.getByLabel('E-mail addresses of team managers').fill('mate@harbour.example');
+  await next.click();
+  await page.waitForURL(/\/harbour-netball\/spring-2027\/readiness/);
+  await expect(page.getByRole('heading', { name: 'Readiness', level: 1 })).toBeVisible();
+  await readLink(request, 'mate@harbour.example', /http\S+\/join\/\S+/);
   expect(errors).toEqual([]);
 });

@@ -15,20 +15,19 @@ test('a referee compares two teams on a phone: who wears what, numbers that clas
   const errors = listenForErrors(page);
   await signIn(page, 'referee@tern.example');
   await page.waitForURL(/\/match\/tern-estuary\//);
-  await page.getByLabel('Home', { exact: true }).selectOption('Herons');
-  await page.getByLabel('Away', { exact: true }).selectOption('Otters');
-  await expect(
-    page.getByText('14 is on 2 shirts: Calloway and Dunmore. One must change before play.'),
-  ).toBeVisible();
-  await expect(page.getByText(/Kits clear/)).toBeVisible();
+  await page.getByLabel('Division').selectOption('U14 Girls');
+  await page.getByLabel('Home', { exact: true }).selectOption('Kestrels');
+  await page.getByLabel('Away', { exact: true }).selectOption('Foxgloves');
+  await expect(page.getByText(/26 has the digit 6, and only 0–5 are allowed/)).toBeVisible();
+  await expect(page.getByText(/Kits (clear|close|clash)/)).toBeVisible();
   await expectNoSidewaysScroll(page);
   await expectAccessible(page);
 
   // A match is an address of its own: it can be kept and opened again.
   await page.reload();
-  await expect(page.getByRole('heading', { name: 'Otters' }).first()).toBeVisible();
+  await expect(page.getByRole('heading', { name: 'Foxgloves' }).first()).toBeVisible();
   await page.getByRole('button', { name: 'Swap home and away' }).click();
-  await expect(page.getByLabel('Home', { exact: true })).toHaveValue('otters');
+  await expect(page.getByLabel('Home', { exact: true })).toHaveValue('foxgloves');
   expect(errors).toEqual([]);
 });
 
