@@ -1,7 +1,7 @@
 'use client';
 
 import { useRouter } from 'next/navigation';
-import { useTransition } from 'react';
+import { useState, useTransition } from 'react';
 import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { Field } from '@/components/ui/field';
@@ -15,7 +15,16 @@ type Picked = { division: string | null; home: string | null; away: string | nul
 export function MatchChoice({ choice, path }: { choice: Choice; path: string }) {
   const router = useRouter();
   const [pending, startTransition] = useTransition();
+  // Kept here as well as in the address: a second choice made before the first has been answered must not lose it.
+  const [picked, setPicked] = useState<Picked>(choice);
+  const answered = `${choice.division}/${choice.home}/${choice.away}`;
+  const [seen, setSeen] = useState(answered);
+  if (answered !== seen && !pending) {
+    setSeen(answered);
+    setPicked(choice);
+  }
   const go = ({ division, home, away }: Picked) => {
+    setPicked({ division, home, away });
     const query = new URLSearchParams();
     for (const [key, value] of Object.entries({ division, home, away })) if (value) query.set(key, value);
     startTransition(() => router.replace(`${path}?${query}`, { scroll: false }));
@@ -30,7 +39,7 @@ export function MatchChoice({ choice, path }: { choice: Choice; path: string }) 
           {(wiring) => (
             <Select
               {...wiring}
-              value={choice.division ?? ''}
+              value={picked.division ?? ''}
               options={choice.divisions.map((division) => ({ value: division.slug, label: division.name }))}
               onChange={(event) => go({ division: event.target.value, home: null, away: null })}
             />
@@ -41,9 +50,9 @@ export function MatchChoice({ choice, path }: { choice: Choice; path: string }) 
             <Select
               {...wiring}
               placeholder="Pick a team"
-              value={choice.home ?? ''}
-              options={options(choice.away)}
-              onChange={(event) => go({ ...choice, home: event.target.value })}
+              value={picked.home ?? ''}
+              options={options(picked.away)}
+              onChange={(event) => go({ ...picked, home: event.target.value })}
             />
           )}
         </Field>
@@ -52,16 +61,16 @@ export function MatchChoice({ choice, path }: { choice: Choice; path: string }) 
             <Select
               {...wiring}
               placeholder="Pick a team"
-              value={choice.away ?? ''}
-              options={options(choice.home)}
-              onChange={(event) => go({ ...choice, away: event.target.value })}
+              value={picked.away ?? ''}
+              options={options(picked.home)}
+              onChange={(event) => go({ ...picked, away: event.target.value })}
             />
           )}
         </Field>
       </form>
-      {choice.home !== null && choice.away !== null ? (
+      {picked.home !== null && picked.away !== null ? (
         <div className="mt-3">
-          <Button size="sm" onClick={() => go({ ...choice, home: choice.away, away: choice.home })}>
+          <Button size="sm" onClick={() => go({ ...picked, home: picked.away, away: picked.home })}>
             Swap home and away
           </Button>
         </div>
