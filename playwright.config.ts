@@ -3,10 +3,13 @@ import { defineConfig } from '@playwright/test';
 // Ports of its own, so that a running Raglan is not in the way.
 process.env.RAGLAN_E2E_PORT ??= '3217';
 process.env.RAGLAN_E2E_INBOX_PORT ??= '3218';
+process.env.RAGLAN_E2E_SECOND_PORT ??= '3219';
 const port = process.env.RAGLAN_E2E_PORT;
 const inboxPort = process.env.RAGLAN_E2E_INBOX_PORT;
 /** Where a test reads the e-mails that the application sent: GET /messages. */
 process.env.RAGLAN_E2E_INBOX_URL = `http://127.0.0.1:${inboxPort}`;
+/** A second web process on the same database. */
+process.env.RAGLAN_E2E_SECOND_URL = `http://127.0.0.1:${process.env.RAGLAN_E2E_SECOND_PORT}`;
 
 export default defineConfig({
   testDir: 'tests/e2e',

@@ -12,6 +12,7 @@ import { copyTemplate, openTestCluster } from './test-cluster.mjs';
 
 const port = Number(process.env.RAGLAN_E2E_PORT ?? 3217);
 const inboxPort = Number(process.env.RAGLAN_E2E_INBOX_PORT ?? 3218);
+const secondPort = Number(process.env.RAGLAN_E2E_SECOND_PORT ?? 3219);
 const baseUrl = `http://127.0.0.1:${port}`;
 
 const services = new Services();
@@ -69,14 +70,17 @@ async function bringUp() {
       RAGLAN_MAIL_HTTP_PORT: String(inboxPort),
     },
   });
-  services.start({ ...plan, name: 'web', args: ['scripts/web.mjs'], env: { ...web, ...shared } });
-  services.start({
-    ...plan,
-    name: 'worker',
-    args: [`${build.commandFolder}/worker.mjs`],
-    env: { ...worker, ...shared },
-  });
-  await Promise.race([waitUntilReady(`${baseUrl}/api/ready`, 60_000), services.failed, askedToStop]);
+  // Two of each: nothing may depend on which process answers or works. Playwright waits for the last to be ready.
+  for (const name of ['worker-1', 'worker-2']) {
+    const args = [`${build.commandFolder}/worker.mjs`];
+    services.start({ ...plan, name, args, env: { ...worker, ...shared } });
+  }
+  for (const listening of [secondPort, port]) {
+    const env = { ...web, ...shared, PORT: String(listening) };
+    services.start({ ...plan, name: `web-${listening}`, args: ['scripts/web.mjs'], env });
+    const ready = waitUntilReady(`http://127.0.0.1:${listening}/api/ready`, 60_000);
+    await Promise.race([ready, services.failed, askedToStop]);
+  }
   say(`under test at ${baseUrl}`);
   await Promise.race([askedToStop, services.failed]);
 }

@@ -77,6 +77,7 @@ const endToEnd = {
           PLAYWRIGHT_JSON_OUTPUT_NAME: report,
           RAGLAN_E2E_PORT: String(await findFreePort()),
           RAGLAN_E2E_INBOX_PORT: String(await findFreePort()),
+          RAGLAN_E2E_SECOND_PORT: String(await findFreePort()),
         },
       },
     );

@@ -57,6 +57,8 @@ export function defineRoute<
       return await route.run(ctx, { params, query, body, request });
     } catch (error) {
       if (error instanceof AppError) return makeProblem(error, base.requestId);
+      // The caller has hung up: there is nobody to answer, and nothing of ours that failed.
+      if (request.signal.aborted) return new Response(null, { status: 499 });
       getLog().error({ err: error, requestId: base.requestId }, 'route failed');
       return makeFaultProblem(base.requestId);
     }
