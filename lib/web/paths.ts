@@ -50,6 +50,8 @@ export const paths = {
     rosterCsv: (league: string, rosterId: string) => `/api/v1/leagues/${league}/rosters/${rosterId}/csv`,
     rosterFile: (league: string, rosterId: string) =>
       `/api/v1/leagues/${league}/rosters/${rosterId}/read-file`,
+    readinessCsv: (league: string, season: string) =>
+      `/api/v1/leagues/${league}/readiness.csv?season=${encodeURIComponent(season)}`,
     historyCsv: (league: string) => `/api/v1/leagues/${league}/history.csv`,
     bundleState: (league: string, batch: string) => `/api/v1/leagues/${league}/batches/${batch}/bundle`,
     bundleZip: (league: string, batch: string) => `/api/v1/leagues/${league}/batches/${batch}/bundle.zip`,

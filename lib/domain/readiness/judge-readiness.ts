@@ -128,7 +128,8 @@ function sayFindings(findings: readonly Finding[], numbers: readonly string[]): 
         ? `${countOf(alike.length, 'size')} missing`
         : first.code === 'number-missing'
           ? `${countOf(alike.length, 'number')} missing`
-          : first.message.replace(/\.$/, '');
+          : // What stands behind a colon explains; here there is room for what is wrong.
+            (first.message.split(': ')[0] ?? '').replace(/\.$/, '');
   const covered =
     shared > 1 ? shared : first.code === 'size-missing' || first.code === 'number-missing' ? alike.length : 1;
   const more = findings.length - covered;

@@ -1,62 +1,19 @@
-import { listDivisionViews } from '@/db/queries/division-view';
-import { listSeasonRosters } from '@/db/queries/rosters';
-import { findSeasonBySlug } from '@/db/queries/season-view';
 import { withLeague } from '@/db/tenant';
-import { can, canForWholeLeague } from '@/lib/domain/access/permissions';
-import { formatShortDay } from '@/lib/domain/dates/format';
+import { can } from '@/lib/domain/access/permissions';
 import { toDay } from '@/lib/domain/dates/zone';
-import { judgeReadiness } from '@/lib/domain/readiness/judge-readiness';
-import { checkRoster } from '@/lib/domain/rules/check-roster';
-import { notFound } from '@/lib/platform/errors';
 import { assertCan, type ActorContext } from '../context';
+import { readReadiness } from '../readiness-reading';
 
-/** Where every team of a season stands; a manager sees the teams they are named for. */
+/** Where every team of a season stands, and what the person looking may do about it. */
 export async function listReadiness(ctx: ActorContext, input: { season: string }) {
   assertCan(ctx.actor, 'readiness.read');
-  const whole = canForWholeLeague(ctx.actor, 'readiness.read');
-  return withLeague(ctx.league.id, async (tx) => {
-    const season = await findSeasonBySlug(tx, input.season);
-    if (!season) throw notFound('season');
-    const divisions = new Map(
-      (await listDivisionViews(tx, season.id)).map((division) => [division.id, division]),
-    );
-    const rosters = await listSeasonRosters(tx, season.id, whole ? null : ctx.actor.teamIds);
-    const teams = rosters.map((roster) => {
-      const division = divisions.get(roster.team.divisionId);
-      const rules = division?.rules?.ruleSet;
-      return {
-        id: roster.team.id,
-        slug: roster.team.slug,
-        name: roster.team.name,
-        kit: roster.team.kits.home,
-        division: division?.name ?? '',
-        divisionSlug: division?.slug ?? '',
-        state: roster.state,
-        batch: roster.batch,
-        players: roster.players.length,
-        // Found by name on this page, so that a coordinator can answer a family's question.
-        playerNames: roster.players.map((player) => player.name),
-        managers: roster.managers.map((manager) => manager.name),
-        ...judgeReadiness({
-          state: roster.state,
-          players: roster.players.length,
-          least: division?.leastPlayers ?? 0,
-          managers: roster.managers.length,
-          returnReason: roster.returnReason,
-          batch: roster.batch,
-          signedOffOn: roster.signedOffAt && formatShortDay(toDay(roster.signedOffAt, ctx.league.timeZone)),
-          check: rules ? checkRoster(rules, roster.players, division.garments) : null,
-          numbers: roster.players.map((player) => player.number.trim()),
-        }),
-      };
-    });
-    return {
-      season,
-      teams,
-      today: toDay(ctx.now, ctx.league.timeZone),
-      may: { remind: can(ctx.actor, 'readiness.remind'), batch: can(ctx.actor, 'batch.make') },
-    };
-  });
+  const { season, teams } = await withLeague(ctx.league.id, (tx) => readReadiness(tx, ctx, input.season));
+  return {
+    season,
+    teams,
+    today: toDay(ctx.now, ctx.league.timeZone),
+    may: { remind: can(ctx.actor, 'readiness.remind'), batch: can(ctx.actor, 'batch.make') },
+  };
 }
 export type ReadinessList = Awaited<ReturnType<typeof listReadiness>>;
 export type ReadyTeam = ReadinessList['teams'][number];

@@ -1,17 +1,15 @@
 import { z } from 'zod';
 import { insertAuditEvent } from '@/db/queries/audit';
-import { listDivisionViews } from '@/db/queries/division-view';
 import { queueEmail } from '@/db/queries/jobs';
-import { listManagersOfTeams, listSeasonRosters } from '@/db/queries/rosters';
-import { findSeasonBySlug } from '@/db/queries/season-view';
-import { takeRatePoint, type RateBudget } from '@/db/rate-limit';
+import { listManagersOfTeams } from '@/db/queries/rosters';
+import { clearRateBudget, takeRatePoint, type RateBudget } from '@/db/rate-limit';
 import { withLeague } from '@/db/tenant';
 import { formatInstant } from '@/lib/domain/dates/format';
-import { judgeReadiness } from '@/lib/domain/readiness/judge-readiness';
-import { checkRoster } from '@/lib/domain/rules/check-roster';
-import { getEnv } from '@/lib/platform/env';
-import { AppError, notFound } from '@/lib/platform/errors';
+import { isRosterEditable } from '@/lib/domain/roster/roster-state';
+import { AppError } from '@/lib/platform/errors';
 import { assertCan, type ActorContext } from '../context';
+import { links } from '../links';
+import { readReadiness } from '../readiness-reading';
 
 export const remindSchema = z.object({
   season: z.string().max(80),
@@ -30,53 +28,50 @@ export async function remindManagers(
   input: z.output<typeof remindSchema>,
 ): Promise<{ teams: number; people: number; leftOut: number }> {
   assertCan(ctx.actor, 'readiness.remind');
-  return withLeague(ctx.league.id, async (tx) => {
-    const season = await findSeasonBySlug(tx, input.season);
-    if (!season) throw notFound('season');
-    const divisions = new Map(
-      (await listDivisionViews(tx, season.id)).map((division) => [division.id, division]),
-    );
-    const rosters = await listSeasonRosters(tx, season.id, input.teamIds);
-    const managers = await listManagersOfTeams(tx, input.teamIds);
-    const told = new Set<string>();
-    let teams = 0;
-    for (const roster of rosters) {
-      const division = divisions.get(roster.team.divisionId);
-      const mine = managers.filter((manager) => manager.teamId === roster.team.id);
-      if (!division || mine.length === 0 || (roster.state !== 'open' && roster.state !== 'returned'))
-        continue;
-      if ((await takeRatePoint(perTeam, roster.team.id)) !== null) continue;
-      const { holds } = judgeReadiness({
-        state: roster.state,
-        players: roster.players.length,
-        least: division.leastPlayers,
-        managers: mine.length,
-        returnReason: roster.returnReason,
-        batch: null,
-        signedOffOn: null,
-        check: division.rules ? checkRoster(division.rules.ruleSet, roster.players, division.garments) : null,
-        numbers: roster.players.map((player) => player.number.trim()),
-      });
-      const link = `${getEnv().RAGLAN_BASE_URL}/${ctx.league.slug}/${season.slug}/rosters/${roster.team.slug}`;
-      const freezes = formatInstant(division.freezesAt, ctx.league.timeZone);
-      for (const { email } of mine) {
-        const params = { league: ctx.league.name, team: roster.team.name, freezes, holds: `${holds}.`, link };
-        await queueEmail(tx, ctx, email, { template: 'roster-reminder', params });
-        told.add(email);
+  const taken: string[] = [];
+  try {
+    return await withLeague(ctx.league.id, async (tx) => {
+      const { season, teams } = await readReadiness(tx, ctx, input.season);
+      const managers = await listManagersOfTeams(tx, input.teamIds);
+      const told = new Set<string>();
+      for (const team of teams.filter(
+        ({ id, state }) => input.teamIds.includes(id) && isRosterEditable(state),
+      )) {
+        const mine = managers.filter(({ teamId }) => teamId === team.id);
+        if (mine.length === 0 || (await takeRatePoint(perTeam, team.id)) !== null) continue;
+        taken.push(team.id);
+        for (const { email } of mine) {
+          const params = {
+            league: ctx.league.name,
+            team: team.name,
+            freezes: formatInstant(team.freezesAt, ctx.league.timeZone),
+            holds: `${team.holds}.`,
+            link: links.roster(ctx.league.slug, season.slug, team.slug),
+          };
+          await queueEmail(tx, ctx, email, { template: 'roster-reminder', params });
+          told.add(email);
+        }
       }
-      teams += 1;
-    }
-    if (teams === 0) {
-      throw new AppError(
-        'conflict',
-        'Nobody was written to: these teams were reminded within a day, have no manager, or have nothing to do.',
+      if (taken.length === 0) {
+        throw new AppError(
+          'conflict',
+          'Nobody was written to: these teams were reminded within a day, have no manager, or have nothing to do.',
+        );
+      }
+      await insertAuditEvent(
+        tx,
+        { ...ctx, userId: ctx.actor.userId },
+        {
+          type: 'managers reminded',
+          subjectId: season.id,
+          data: { teams: taken.length, people: told.size },
+        },
       );
-    }
-    await insertAuditEvent(
-      tx,
-      { ...ctx, userId: ctx.actor.userId },
-      { type: 'managers reminded', subjectId: season.id, data: { teams, people: told.size } },
-    );
-    return { teams, people: told.size, leftOut: input.teamIds.length - teams };
-  });
+      return { teams: taken.length, people: told.size, leftOut: input.teamIds.length - taken.length };
+    });
+  } catch (error) {
+    // Nothing was sent, so nobody has had today's reminder.
+    for (const teamId of taken) await clearRateBudget(perTeam, teamId);
+    throw error;
+  }
 }

@@ -3,6 +3,7 @@
 import { useRouter } from 'next/navigation';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/confirm-dialog';
+import { Icon } from '@/components/ui/icon';
 import { PageHeader } from '@/components/ui/page-header';
 import { useToast } from '@/components/ui/toast';
 import { countOf } from '@/lib/domain/text/count-of';
@@ -36,7 +37,7 @@ export function ReadinessHead({
   const late = teams.filter(
     (team) => (team.group === 'collecting' || team.group === 'blocked') && team.managers.length > 0,
   );
-  const managers = new Set(late.flatMap((team) => team.managers)).size;
+  const managers = new Set(late.flatMap((team) => team.managerIds)).size;
   const players = teams.reduce((sum, team) => sum + team.players, 0);
   const figures = [
     count('in a batch') > 0 && `${count('in a batch')} in a batch`,
@@ -64,6 +65,16 @@ export function ReadinessHead({
       subtitle={`${countOf(teams.length, 'team')}, ${countOf(players, 'player')}. ${figures.join(', ')}.`}
       actions={
         <>
+          {teams.length > 0 && (
+            <a
+              href={paths.api.readinessCsv(league, season)}
+              download
+              className="touch rounded-control text-damson hover:bg-linen inline-flex items-center justify-center gap-2 px-3.5 font-[600] no-underline print:hidden"
+            >
+              <Icon name="download" />
+              CSV
+            </a>
+          )}
           {may.remind && managers > 0 && (
             <ConfirmDialog
               title={`Remind ${countOf(managers, 'manager')}?`}
@@ -73,13 +84,14 @@ export function ReadinessHead({
               trigger={<Button>Remind {countOf(managers, 'manager')}</Button>}
             >
               <p>Each gets an e-mail saying what holds their team, at most once a day for a team.</p>
-              <p className="mt-2">
-                {late
-                  .slice(0, 15)
-                  .map((team) => team.name)
-                  .join(', ')}
-                {late.length > 15 && ` and ${late.length - 15} more`}.
-              </p>
+              <ul className="border-hem mt-3 grid max-h-60 gap-1 overflow-y-auto border-t pt-2">
+                {late.map((team) => (
+                  <li key={team.id} className="flex flex-wrap justify-between gap-x-4">
+                    <span className="font-[560]">{team.name}</span>
+                    <span className="text-dusk">{team.managers.join(', ')}</span>
+                  </li>
+                ))}
+              </ul>
             </ConfirmDialog>
           )}
           {may.batch && (

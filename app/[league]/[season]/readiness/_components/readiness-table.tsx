@@ -101,7 +101,7 @@ function makeColumns(league: string, season: string): DataColumn<ReadyTeam>[] {
           <YokeTile kit={team.kit} number="12" size="sm" />
           <TextLink
             href={paths.roster(league, season, team.slug)}
-            className="text-ink! no-underline! hover:underline!"
+            className="text-ink! font-[620]! no-underline! hover:underline!"
           >
             {team.name}
           </TextLink>
