@@ -16,8 +16,8 @@ export function FormFailure({
       {beside.length === 0
         ? failure.message
         : beside.length === 1
-          ? 'One field below needs another look. Nothing was sent off.'
-          : `${beside.length} fields below need another look. Nothing was sent off.`}
+          ? 'One field needs another look. Nothing was sent off.'
+          : `${beside.length} fields need another look. Nothing was sent off.`}
     </Notice>
   );
 }

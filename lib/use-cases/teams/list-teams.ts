@@ -6,6 +6,7 @@ import { withLeague } from '@/db/tenant';
 import { can, canForWholeLeague } from '@/lib/domain/access/permissions';
 import { notFound } from '@/lib/platform/errors';
 import { assertCan, type ActorContext } from '../context';
+import { findVisibleDivisions } from '../visible-divisions';
 
 /** The teams of a season that the person may see, with their colours, players and managers counted. */
 export async function listTeams(ctx: ActorContext, input: { season: string }) {
@@ -14,12 +15,16 @@ export async function listTeams(ctx: ActorContext, input: { season: string }) {
   return withLeague(ctx.league.id, async (tx) => {
     const season = await findSeasonBySlug(tx, input.season);
     if (!season) throw notFound('season');
-    const divisions = await listDivisionViews(tx, season.id);
+    const visible = await findVisibleDivisions(tx, ctx, 'team.read');
+    const divisions = (await listDivisionViews(tx, season.id)).filter(
+      (division) => visible?.has(division.id) ?? true,
+    );
     const players = await countPlayersByTeam(tx, season.id);
     const teams = await listTeamViews(tx, season.id, whole ? null : ctx.actor.teamIds);
     return {
       season: { slug: season.slug, name: season.name },
       mayChange: can(ctx.actor, 'team.write'),
+      mayOpenRosters: can(ctx.actor, 'roster.read'),
       divisions: divisions.map(({ id, name }) => ({ id, name })),
       teams: teams.map((team) => ({
         id: team.id,

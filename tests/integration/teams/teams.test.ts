@@ -268,8 +268,9 @@ describe('a list of teams', () => {
 
 describe('who sees teams', () => {
   it('a manager lists and exports their own teams only', async () => {
-    const { teams } = await listTeams(world.manager, { season: world.season.slug });
+    const { teams, divisions } = await listTeams(world.manager, { season: world.season.slug });
     expect(teams.map((team) => team.id)).toEqual([world.teams[0].id]);
+    expect(divisions.map((division) => division.id)).toEqual([world.division.id]);
     const { csv } = await exportTeams(world.manager, { season: world.season.slug });
     expect(csv).toContain(world.teams[0].name);
     expect(csv).not.toContain(world.teams[1].name);

@@ -4,7 +4,7 @@ import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { Checkbox } from '@/components/ui/checkbox';
-import { FieldError, SelectField, TextField } from '@/components/ui/field';
+import { FieldError, SelectField, TextareaField, TextField } from '@/components/ui/field';
 import { IconButton } from '@/components/ui/icon-button';
 import { Menu } from '@/components/ui/menu';
 import { useToast } from '@/components/ui/toast';
@@ -180,7 +180,8 @@ function SizesField({
   const [typed, setTyped] = useState(writeSizes(sizes));
   const same = JSON.stringify(readSizes(typed)) === JSON.stringify(sizes);
   return (
-    <TextField
+    <TextareaField
+      rows={2}
       label="Sizes, smallest first"
       required
       value={same ? typed : writeSizes(sizes)}

@@ -39,11 +39,12 @@ export function TeamsTable({
   const [division, setDivision] = useState('all');
   const [going, setGoing] = useState<ListedTeam | null>(null);
   const { teams, mayChange, divisions } = list;
+  const leadsTo = mayChange ? 'team' : list.mayOpenRosters ? 'roster' : null;
   const shown = useMemo(
     () => teams.filter((team) => division === 'all' || team.divisionId === division),
     [teams, division],
   );
-  const columns = useMemo(() => makeColumns(league, season, mayChange), [league, season, mayChange]);
+  const columns = useMemo(() => makeColumns(league, season, leadsTo), [league, season, leadsTo]);
 
   const remove = async () => {
     if (!going) return;
@@ -66,11 +67,9 @@ export function TeamsTable({
         getRowId={(team) => team.id}
         searchLabel="Find a team"
         {...(division !== 'all' && { onClearFilters: () => setDivision('all') })}
-        onOpenRow={(team) =>
-          router.push(
-            mayChange ? paths.team(league, season, team.slug) : paths.roster(league, season, team.slug),
-          )
-        }
+        {...(leadsTo !== null && {
+          onOpenRow: (team: ListedTeam) => router.push(paths[leadsTo](league, season, team.slug)),
+        })}
         toolbar={
           <FilterChips
             label="Which division"
@@ -150,20 +149,28 @@ export function TeamsTable({
   );
 }
 
-function makeColumns(league: string, season: string, mayChange: boolean): DataColumn<ListedTeam>[] {
+/** `leadsTo` is the page a team's name opens, or null for a reader who may open neither. */
+function makeColumns(
+  league: string,
+  season: string,
+  leadsTo: 'team' | 'roster' | null,
+): DataColumn<ListedTeam>[] {
   return [
     {
       id: 'team',
       header: 'Team',
       rowHead: true,
-      cell: (team) => (
-        <TextLink
-          href={mayChange ? paths.team(league, season, team.slug) : paths.roster(league, season, team.slug)}
-          className="text-ink! break-words no-underline! hover:underline!"
-        >
-          {team.name}
-        </TextLink>
-      ),
+      cell: (team) =>
+        leadsTo === null ? (
+          <span className="font-[560] break-words">{team.name}</span>
+        ) : (
+          <TextLink
+            href={paths[leadsTo](league, season, team.slug)}
+            className="text-ink! break-words no-underline! hover:underline!"
+          >
+            {team.name}
+          </TextLink>
+        ),
       sortValue: (team) => team.name,
       searchText: (team) => team.name,
     },
