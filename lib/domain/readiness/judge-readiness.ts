@@ -89,7 +89,7 @@ function place(facts: ReadinessFacts, findings: readonly Finding[]): Pick<Readin
       holds: facts.signedOffOn === null ? `Roster ${facts.state}` : `Signed off ${facts.signedOffOn}`,
     };
   }
-  if (facts.state === 'submitted') return { group: 'submitted', holds: 'Waits for your sign-off' };
+  if (facts.state === 'submitted') return { group: 'submitted', holds: 'Submitted, waits for sign-off' };
   if (facts.players === 0) {
     return {
       group: 'collecting',

@@ -27,7 +27,7 @@ export type CellInputProps = {
 };
 
 const look =
-  'field-text absolute inset-0 z-10 h-full w-full min-w-0 rounded-none border-0 bg-card outline-2 -outline-offset-2 outline-damson';
+  'field-text scroll-my-20 absolute inset-0 z-10 h-full w-full min-w-0 rounded-none border-0 bg-card outline-2 -outline-offset-2 outline-damson';
 
 /** The input of the cell being edited. Enter and Tab hand it in and go on, Escape leaves the cell as it was. */
 export function CellInput(props: CellInputProps) {
@@ -113,7 +113,7 @@ function TextCellInput({
           look,
           'px-3',
           column.field === 'nameOnBack' && 'font-mono',
-          column.field === 'number' && 'type-jersey text-2xl! sm:text-right',
+          column.field === 'number' && 'type-jersey text-2xl! sm:text-right max-sm:px-1 max-sm:text-center',
         )}
       />
       {column.roles !== undefined && (

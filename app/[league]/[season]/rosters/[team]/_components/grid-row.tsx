@@ -10,7 +10,7 @@ import { gravestOf } from './cell-findings';
 import { cardCell, cardPlace, cardRow, severityLook } from './cell-looks';
 
 const cellLook =
-  'border-hem relative h-[2.625rem] p-0 align-middle font-normal focus-visible:z-10 focus-visible:-outline-offset-2 sm:border-t ' +
+  'border-hem relative h-[2.625rem] scroll-my-20 p-0 align-middle font-normal focus-visible:z-10 focus-visible:-outline-offset-2 sm:border-t ' +
   cardCell;
 
 type Handlers = {

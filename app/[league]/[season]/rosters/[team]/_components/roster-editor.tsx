@@ -146,6 +146,7 @@ export function RosterEditor({
     const next = shown[shown.findIndex(({ id }) => id === player.id) + 1] ?? shown.at(-2);
     session.edit([edit]);
     setPlace({ row: next?.id ?? newRow, column: 0 });
+    focusCellSoon(next?.id ?? newRow, 0);
     showToast({
       tone: 'note',
       title: `Removed ${nameOf(player)}`,
@@ -176,7 +177,7 @@ export function RosterEditor({
     if (!active) return;
     set(active, 'number', label);
     if (!window.matchMedia('(width < 64rem)').matches) return;
-    document.querySelector<HTMLElement>(`[data-row="${active.id}"][data-column="${numberColumn}"]`)?.focus();
+    focusCellSoon(active.id, numberColumn);
   };
   const turn = (back: boolean) => {
     const { edits, skipped } = back ? session.undo() : session.redo();
@@ -386,4 +387,11 @@ export function RosterEditor({
       </div>
     </>
   );
+}
+
+/** Focuses a cell once a menu that has just been used, and may have lost its button, has let the focus go. */
+function focusCellSoon(row: string, column: number): void {
+  setTimeout(() => {
+    document.querySelector<HTMLElement>(`[data-row="${row}"][data-column="${column}"]`)?.focus();
+  }, 50);
 }

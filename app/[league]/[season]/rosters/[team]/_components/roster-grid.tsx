@@ -190,8 +190,18 @@ export function RosterGrid({
   });
 
   const press = (event: KeyboardEvent<HTMLTableElement>) => {
-    const cell = event.target as HTMLElement;
-    if (cell.dataset['row'] === undefined) return;
+    const target = event.target as HTMLElement;
+    const cell = target.closest<HTMLElement>('[data-row]');
+    if (cell?.dataset['row'] === undefined || event.defaultPrevented) return;
+    if (target !== cell) {
+      // Inside a cell stands a button: its own keys are its own, and those that move lead on from the cell.
+      if (!target.matches('button') || !/^(Arrow|Tab$|Escape$|Home$|End$)/.test(event.key)) return;
+      if (event.key === 'Escape') {
+        event.preventDefault();
+        cell.focus();
+        return;
+      }
+    }
     const at: Place = { row: cell.dataset['row'], column: Number(cell.dataset['column']) };
     const control = event.ctrlKey || event.metaKey;
     const take = () => {
@@ -237,7 +247,11 @@ export function RosterGrid({
         const inside = cell.querySelector<HTMLElement>('button');
         if (inside) take();
         inside?.focus();
-        if (at.column === columns.length + 1) inside?.click();
+        // A menu opens on the key, not on a click.
+        if (at.column === columns.length + 1)
+          inside?.dispatchEvent(
+            new KeyboardEvent('keydown', { key: 'Enter', bubbles: true, cancelable: true }),
+          );
       }
     } else if (event.key === 'Delete' || event.key === 'Backspace') {
       take();
@@ -375,7 +389,7 @@ export function RosterGrid({
                     }}
                     onClick={(event) => pressCell(here, event)}
                     className={joinClasses(
-                      'border-hem relative h-[2.625rem] cursor-cell border-t p-0 align-middle focus-visible:-outline-offset-2',
+                      'border-hem relative h-[2.625rem] scroll-my-20 cursor-cell border-t p-0 align-middle focus-visible:-outline-offset-2',
                       'max-sm:rounded-control max-sm:border-thread max-sm:block max-sm:border max-sm:border-dashed',
                       at > 0 && 'max-sm:hidden',
                     )}
