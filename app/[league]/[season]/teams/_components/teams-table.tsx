@@ -99,6 +99,7 @@ export function TeamsTable({
               <Button
                 size="sm"
                 look="quiet"
+                unavailable={sayWhyItStays(team)}
                 onClick={() => setGoing(team)}
                 aria-label={`Remove ${team.name}`}
               >
@@ -147,6 +148,14 @@ export function TeamsTable({
       </ConfirmDialog>
     </Card>
   );
+}
+
+/** What keeps a team from being removed, as the server would say it; undefined when nothing does. */
+function sayWhyItStays({ batch, state }: ListedTeam): string | undefined {
+  if (batch !== null) return `Batch ${batch} holds its roster.`;
+  return state === 'signed off' || state === 'frozen'
+    ? `Its roster is ${state}. Reopen it first.`
+    : undefined;
 }
 
 /** `leadsTo` is the page a team's name opens, or null for a reader who may open neither. */
