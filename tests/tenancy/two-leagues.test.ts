@@ -23,6 +23,7 @@ import { endRole } from '@/lib/use-cases/people/end-role';
 import { invitePerson } from '@/lib/use-cases/people/invite-person';
 import { resendInvitation } from '@/lib/use-cases/people/resend-invitation';
 import { revokeInvitation } from '@/lib/use-cases/people/revoke-invitation';
+import { exportReadiness } from '@/lib/use-cases/readiness/export-readiness';
 import { listReadiness } from '@/lib/use-cases/readiness/list-readiness';
 import { remindManagers } from '@/lib/use-cases/readiness/remind-managers';
 import { exportRoster } from '@/lib/use-cases/rosters/export-roster';
@@ -85,6 +86,9 @@ const divisionFields = () => ({
 
 type Attack = (ctx: ActorContext) => Promise<unknown>;
 
+/** The season of whoever attacks: what they add goes in there, so that only the other things they name are strange. */
+const homeSeason = (ctx: ActorContext): string => ctx.league.currentSeason?.slug ?? '';
+
 /** Every use case that is given the id or the address of a thing, aimed at the other league's. By file. */
 const attacks: Record<string, Attack | Attack[]> = {
   'batches/change-batch': (ctx) =>
@@ -102,7 +106,7 @@ const attacks: Record<string, Attack | Attack[]> = {
   ],
   'batches/hold-batch': (ctx) =>
     holdBatch(ctx, {
-      season: mine.season.slug,
+      season: homeSeason(ctx),
       teamIds: [theirs.teams[1].id],
       shopId: theirs.shop.id,
       promisedOn: null,
@@ -117,12 +121,12 @@ const attacks: Record<string, Attack | Attack[]> = {
     openBundleFile(ctx, { code: batch.released, path: null, isFirstRange: true }),
   'batches/rebuild-bundle': (ctx) => rebuildBundle(ctx, { batchId: batch.releasedId }),
   'batches/release-batch': (ctx) => releaseBatch(ctx, { batchId: batch.heldId }),
-  'divisions/add-division': (ctx) => addDivision(ctx, { season: mine.season.slug, fields: divisionFields() }),
+  'divisions/add-division': (ctx) => addDivision(ctx, { season: homeSeason(ctx), fields: divisionFields() }),
   'divisions/change-division': (ctx) =>
     changeDivision(ctx, { divisionId: theirs.division.id, rowVersion: 1, fields: divisionFields() }),
   'divisions/list-divisions': [
     (ctx) => listDivisions(ctx, { season: theirs.season.slug }),
-    (ctx) => getDivisionForm(ctx, { season: mine.season.slug, division: theirs.division.slug }),
+    (ctx) => getDivisionForm(ctx, { season: homeSeason(ctx), division: theirs.division.slug }),
   ],
   'divisions/remove-division': (ctx) => removeDivision(ctx, { divisionId: theirs.division.id }),
   'match/check-match': (ctx) =>
@@ -144,9 +148,10 @@ const attacks: Record<string, Attack | Attack[]> = {
     } as never),
   'people/resend-invitation': (ctx) => resendInvitation(ctx, { invitationId }),
   'people/revoke-invitation': (ctx) => revokeInvitation(ctx, { invitationId }),
+  'readiness/export-readiness': (ctx) => exportReadiness(ctx, { season: theirs.season.slug }),
   'readiness/list-readiness': (ctx) => listReadiness(ctx, { season: theirs.season.slug }),
   'readiness/remind-managers': (ctx) =>
-    remindManagers(ctx, { season: mine.season.slug, teamIds: [theirs.teams[0].id] }),
+    remindManagers(ctx, { season: homeSeason(ctx), teamIds: [theirs.teams[0].id] }),
   'rosters/export-roster': (ctx) => exportRoster(ctx, { rosterId: theirs.teams[0].rosterId }),
   'rosters/freeze-roster': (ctx) => freezeRoster(ctx, { rosterId: theirs.teams[1].rosterId, revision: 1 }),
   'rosters/get-roster': [
@@ -209,7 +214,7 @@ const attacks: Record<string, Attack | Attack[]> = {
   'seasons/get-season': (ctx) => getSeason(ctx, { season: theirs.season.slug }),
   'teams/add-team': (ctx) =>
     addTeam(ctx, {
-      season: mine.season.slug,
+      season: homeSeason(ctx),
       fields: { name: 'Intruders', divisionId: theirs.division.id, kits },
     }),
   'teams/change-team': (ctx) =>
@@ -221,7 +226,7 @@ const attacks: Record<string, Attack | Attack[]> = {
   'teams/export-teams': (ctx) => exportTeams(ctx, { season: theirs.season.slug }),
   'teams/import-teams': (ctx) =>
     importTeams(ctx, {
-      season: mine.season.slug,
+      season: homeSeason(ctx),
       teams: [{ name: 'Intruders', divisionId: theirs.division.id, home: someKit, away: null }],
       refused: 0,
     }),
