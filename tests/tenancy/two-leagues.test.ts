@@ -1,5 +1,6 @@
 import { readdirSync } from 'node:fs';
 import { beforeAll, describe, expect, it } from 'vitest';
+import { permissionTable, type Permission, type Role } from '@/lib/domain/access/permissions';
 import { AppError } from '@/lib/platform/errors';
 import type { ActorContext } from '@/lib/use-cases/context';
 import { buildBundle } from '@/lib/use-cases/batches/build-bundle';
@@ -51,7 +52,18 @@ import { exportTeams } from '@/lib/use-cases/teams/export-teams';
 import { importTeams } from '@/lib/use-cases/teams/import-teams';
 import { listTeams } from '@/lib/use-cases/teams/list-teams';
 import { removeTeam } from '@/lib/use-cases/teams/remove-team';
+import { exportHistory } from '@/lib/use-cases/history/export-history';
+import { listEvents } from '@/lib/use-cases/history/list-events';
+import { changeLeagueSettings } from '@/lib/use-cases/leagues/change-league-settings';
+import { getLeagueSettings } from '@/lib/use-cases/leagues/get-league-settings';
+import { listPeople } from '@/lib/use-cases/people/list-people';
+import { listRuleSets } from '@/lib/use-cases/rule-sets/list-rule-sets';
+import { startRuleSet } from '@/lib/use-cases/rule-sets/start-rule-set';
+import { listSeasons } from '@/lib/use-cases/seasons/list-seasons';
+import { openSeason } from '@/lib/use-cases/seasons/open-season';
+import { readTeamFile } from '@/lib/use-cases/teams/read-team-file';
 import { buildWorld, someGarments, someKit, someRules, type FurnishedLeague } from '../factories/league';
+import { makeAdd } from '../factories/rosters';
 import { queryAsAdmin } from '../support/database';
 
 // One league attacks the other with everything it could have guessed: every id and every address of it.
@@ -257,6 +269,85 @@ const harmless: Record<string, string> = {
   'teams/read-team-file': 'touches no league',
 };
 
+/** The permission each attack stands before, in the order of its attacks: whoever lacks it is refused at home too. Null: open to everyone of the league. */
+const guards: Record<string, Permission | Permission[] | null> = {
+  'batches/change-batch': 'batch.make',
+  'batches/discard-batch': 'batch.make',
+  'batches/get-batch': 'batch.read',
+  'batches/hold-batch': 'batch.make',
+  'batches/list-batches': 'batch.make',
+  'batches/mark-batch': 'batch.mark',
+  'batches/open-bundle-file': 'batch.read',
+  'batches/rebuild-bundle': 'batch.read',
+  'batches/release-batch': 'batch.make',
+  'divisions/add-division': 'division.write',
+  'divisions/change-division': 'division.write',
+  'divisions/list-divisions': ['division.read', 'division.write'],
+  'divisions/remove-division': 'division.write',
+  'match/check-match': 'match.check',
+  'people/change-manager-teams': 'people.manage',
+  'people/end-role': 'people.manage',
+  'people/invite-person': 'people.manage',
+  'people/resend-invitation': 'people.manage',
+  'people/revoke-invitation': 'people.manage',
+  'readiness/export-readiness': 'readiness.read',
+  'readiness/list-readiness': 'readiness.read',
+  'readiness/remind-managers': 'readiness.remind',
+  'rosters/export-roster': 'roster.read',
+  'rosters/freeze-roster': 'roster.sign-off',
+  'rosters/get-roster': 'roster.read',
+  'rosters/import-roster': 'roster.edit',
+  'rosters/list-mappings': 'roster.edit',
+  'rosters/read-roster-file': 'roster.edit',
+  'rosters/reopen-roster': 'roster.sign-off',
+  'rosters/return-roster': 'roster.return',
+  'rosters/save-roster-edits': 'roster.edit',
+  'rosters/sign-off-roster': 'roster.sign-off',
+  'rosters/submit-roster': 'roster.submit',
+  'rosters/withdraw-roster': 'roster.submit',
+  'rule-sets/discard-draft': 'rule-set.write',
+  'rule-sets/get-rule-set': 'rule-set.read',
+  'rule-sets/put-in-force': 'rule-set.write',
+  'rule-sets/save-draft': 'rule-set.write',
+  'seasons/change-season': 'season.write',
+  'seasons/choose-current-season': 'season.write',
+  'seasons/get-season': null,
+  'teams/add-team': 'team.write',
+  'teams/change-team': 'team.write',
+  'teams/export-teams': 'team.read',
+  'teams/import-teams': 'team.write',
+  'teams/list-teams': 'team.read',
+  'teams/remove-team': 'team.write',
+};
+
+const noFilter = { person: null, kind: null, from: null, to: null, before: null } as never;
+
+/** What takes no id and so can't be aimed at another league, with the permission it stands before. */
+const guarded: Record<string, { permission: Permission; attempt: Attack }> = {
+  'history/export-history': {
+    permission: 'history.read',
+    attempt: async (ctx) => exportHistory(ctx, noFilter),
+  },
+  'history/list-events': { permission: 'history.read', attempt: (ctx) => listEvents(ctx, noFilter) },
+  'leagues/change-league-settings': {
+    permission: 'league.settings',
+    attempt: (ctx) => changeLeagueSettings(ctx, {} as never),
+  },
+  'leagues/get-league-settings': { permission: 'league.settings', attempt: getLeagueSettings },
+  'people/list-people': { permission: 'people.read', attempt: listPeople },
+  'rule-sets/list-rule-sets': { permission: 'rule-set.read', attempt: listRuleSets },
+  'rule-sets/start-rule-set': {
+    permission: 'rule-set.write',
+    attempt: (ctx) => startRuleSet(ctx, { name: 'Mine', sport: 'chess', presetId: null }),
+  },
+  'seasons/list-seasons': { permission: 'season.write', attempt: listSeasons },
+  'seasons/open-season': { permission: 'season.write', attempt: (ctx) => openSeason(ctx, {} as never) },
+  'teams/read-team-file': {
+    permission: 'team.write',
+    attempt: (ctx) => readTeamFile(ctx, { name: 'a.csv', bytes: new TextEncoder().encode('Team') }),
+  },
+};
+
 /** Everything stored of a league, as one hash per table. */
 async function fingerprint(leagueId: string): Promise<Record<string, string>> {
   const tables = await queryAsAdmin<{ name: string }>(
@@ -321,6 +412,16 @@ async function revisionOf(rosterId: string): Promise<number> {
   return row?.revision ?? 0;
 }
 
+const isRefusal = (error: unknown): boolean =>
+  error instanceof AppError && (error.code === 'not-found' || error.code === 'forbidden');
+/** A list of teams to remind is answered as a whole; strange ones in it are left out like teams that do not exist. */
+const isNobodyReminded = (error: unknown): boolean =>
+  error instanceof AppError && error.message.startsWith('Nobody was written to');
+/** Nothing at all is no news; anything else, even without a known secret in it, was not to be had. */
+const isTelling = (value: unknown, secrets: readonly string[]): boolean =>
+  secrets.some((secret) => JSON.stringify(value).includes(secret)) ||
+  !(Array.isArray(value) && value.length === 0);
+
 describe('two leagues', () => {
   it('leave no use case out of this attack', () => {
     const files = readdirSync('lib/use-cases', { recursive: true, encoding: 'utf8' })
@@ -350,10 +451,10 @@ describe('two leagues', () => {
             (error: unknown) => ({ error }),
           );
           if ('error' in outcome) {
-            if (!(outcome.error instanceof AppError))
-              leaks.push(`${role} ${file}: a fault, not a refusal: ${String(outcome.error)}`);
-          } else if (secrets.some((secret) => JSON.stringify(outcome.value).includes(secret))) {
-            leaks.push(`${role} ${file}: tells of the other league`);
+            if (!isRefusal(outcome.error) && !isNobodyReminded(outcome.error))
+              leaks.push(`${role} ${file}: not refused but ${String(outcome.error)}`);
+          } else if (isTelling(outcome.value, secrets)) {
+            leaks.push(`${role} ${file}: ${JSON.stringify(outcome.value).slice(0, 200)}`);
           }
         }
       }
@@ -387,6 +488,71 @@ describe('two leagues', () => {
 });
 
 describe('within one league', () => {
+  it('every role is refused what its row of the table of permissions does not grant, and changes nothing', async () => {
+    const roleOf = {
+      admin: 'league admin',
+      manager: 'team manager',
+      referee: 'referee',
+      decorator: 'decorator',
+    } as const satisfies Record<string, Role>;
+    const doors = [
+      ...Object.entries(attacks).flatMap(([file, given]) =>
+        [given].flat().map((attempt, i) => {
+          const guard = guards[file];
+          return { file, attempt, permission: Array.isArray(guard) ? guard[i] : guard };
+        }),
+      ),
+      ...Object.entries(guarded).map(([file, door]) => ({ file, ...door })),
+    ];
+    const before = await fingerprint(theirs.league.id);
+    const through: string[] = [];
+    let tried = 0;
+    for (const { file, attempt, permission } of doors) {
+      expect([file, permission]).not.toEqual([file, undefined]);
+      if (!permission) continue;
+      for (const [person, role] of Object.entries(roleOf) as [keyof typeof roleOf, Role][]) {
+        if (permissionTable[permission].reach[role] !== 'none') continue;
+        tried += 1;
+        const outcome = await attempt(theirs[person]).then(
+          () => 'done',
+          (error: unknown) => (isRefusal(error) ? 'refused' : String(error)),
+        );
+        if (outcome !== 'refused') through.push(`${role} ${file}: ${outcome}`);
+      }
+    }
+    expect(through).toEqual([]);
+    expect(tried).toBeGreaterThan(120);
+    expect(await fingerprint(theirs.league.id)).toEqual(before);
+  });
+
+  it('a manager is refused the rosters of every team but their own', async () => {
+    const stranger = {
+      ...theirs.manager,
+      actor: { ...theirs.manager.actor, teamIds: [theirs.teams[2].id] },
+    };
+    const before = await fingerprint(theirs.league.id);
+    const through: string[] = [];
+    for (const [file, given] of Object.entries(attacks).filter(([name]) => name.startsWith('rosters/'))) {
+      for (const attack of [given].flat()) {
+        const outcome = await attack(stranger).then(
+          () => 'done',
+          (error: unknown) => (isRefusal(error) ? 'refused' : String(error)),
+        );
+        if (outcome !== 'refused') through.push(`${file}: ${outcome}`);
+      }
+    }
+    expect(through).toEqual([]);
+    const own = await Promise.all([
+      listTeams(stranger, { season: theirs.season.slug }),
+      listReadiness(stranger, { season: theirs.season.slug }),
+    ]);
+    expect(own.map(({ teams }) => teams.map((team) => team.id))).toEqual([
+      [theirs.teams[2].id],
+      [theirs.teams[2].id],
+    ]);
+    expect(await fingerprint(theirs.league.id)).toEqual(before);
+  });
+
   it('nobody but those the table of permissions names gets through a door', async () => {
     const closed: [string, ActorContext, () => Promise<unknown>][] = [
       [
@@ -453,9 +619,17 @@ describe('within one league', () => {
     await expect(
       getRoster(mine.manager, { season: mine.season.slug, team: mine.teams[0].slug }),
     ).resolves.toMatchObject({ players: { length: 2 } });
+    const { rosterId } = mine.teams[0];
+    await saveRosterEdits(mine.manager, {
+      rosterId,
+      baseRevision: 1,
+      edits: [makeAdd({ name: 'Calloway, Ines', number: '14', sizes: { jersey: 'YM' } }, null)],
+    });
+    await submitRoster(mine.manager, { rosterId, revision: await revisionOf(rosterId) });
+    await signOffRoster(mine.admin, { rosterId, revision: await revisionOf(rosterId) });
     const { code } = await holdBatch(mine.admin, {
       season: mine.season.slug,
-      teamIds: [mine.teams[1].id],
+      teamIds: [mine.teams[0].id, mine.teams[1].id],
       shopId: mine.shop.id,
       promisedOn: null,
     });
@@ -470,6 +644,6 @@ describe('within one league', () => {
       home: mine.teams[0].slug,
       away: mine.teams[1].slug,
     });
-    expect(check.match?.home.players).toHaveLength(2);
+    expect(check.match?.home.players).toHaveLength(3);
   });
 });
