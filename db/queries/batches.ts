@@ -173,9 +173,15 @@ const readBatchRosters = (tx: LeagueTx, batchId: string) =>
 /** The rosters a batch holds, by team name. */
 export const listBatchRosters = (tx: LeagueTx, batchId: string) => readBatchRosters(tx, batchId).execute();
 
-/** The rosters a batch holds, locked against changes of state until the transaction ends. */
-export const lockBatchRosters = (tx: LeagueTx, batchId: string) =>
-  readBatchRosters(tx, batchId).forUpdate('r').execute();
+/** The rosters a batch holds, locked against changes of state until the transaction ends. The batch is locked already. */
+export async function lockBatchRosters(tx: LeagueTx, batchId: string) {
+  const held = await listBatchRosters(tx, batchId);
+  await lockRostersOfTeams(
+    tx,
+    held.map((roster) => roster.teamId),
+  );
+  return listBatchRosters(tx, batchId);
+}
 
 /** Changes the shop or the promised day of a held batch; false when the row version is no longer the given one. */
 export async function updateHeldBatch(
@@ -324,6 +330,7 @@ export async function listBatchesOfMyShops(tx: UserTx) {
 
 /** Locks the rosters of these teams against changes of state until the transaction ends, always in the same order. */
 export async function lockRostersOfTeams(tx: LeagueTx, teamIds: readonly string[]): Promise<void> {
+  if (teamIds.length === 0) return;
   await tx
     .selectFrom('rosters')
     .select('id')

@@ -1,6 +1,11 @@
 import type { z } from 'zod';
 import { insertAuditEvent } from '@/db/queries/audit';
-import { lockBatchRosters, replaceBatchRosters, updateHeldBatch } from '@/db/queries/batches';
+import {
+  listBatchRosters,
+  lockRostersOfTeams,
+  replaceBatchRosters,
+  updateHeldBatch,
+} from '@/db/queries/batches';
 import { withLeague } from '@/db/tenant';
 import { listDifferences } from '@/lib/domain/audit/event';
 import { AppError } from '@/lib/platform/errors';
@@ -17,7 +22,10 @@ export async function changeBatch(
   return withLeague(ctx.league.id, async (tx) => {
     const batch = await lockHeldBatch(tx, input.batchId);
     await assertShop(tx, input.shopId);
-    const before = (await lockBatchRosters(tx, batch.id)).map((roster) => roster.team);
+    const held = await listBatchRosters(tx, batch.id);
+    // All at once and so in one order: two batches that reach for each other's teams then wait instead of deadlocking.
+    await lockRostersOfTeams(tx, [...held.map((roster) => roster.teamId), ...input.teamIds]);
+    const before = held.map((roster) => roster.team);
     const teams = await pickReadyTeams(tx, batch.seasonId, input.teamIds, batch.id);
     const changed = await updateHeldBatch(tx, {
       id: batch.id,

@@ -182,7 +182,7 @@ describe('putting a draft in force', () => {
 });
 
 describe('a version that is not a draft', () => {
-  const write = (id: string, change: Record<string, string>) =>
+  const write = (id: string, change: Record<string, string | null>) =>
     withLeague(world.league.id, (tx) =>
       tx.updateTable('rule_set_versions').set(change).where('id', '=', id).execute(),
     );
@@ -191,8 +191,16 @@ describe('a version that is not a draft', () => {
     const ruleSetId = await startInForce();
     const [inForce] = await versionsOf(ruleSetId);
     await draftOnly(ruleSetId, '1-20');
-    for (const change of [{ body: '{}' }, { in_force_from: '2020-01-01' }])
+    for (const change of [
+      { body: '{}' },
+      { in_force_from: '2020-01-01' },
+      { rule_set_id: world.ruleSet.id },
+      { state: 'draft', in_force_from: null },
+    ])
       await expect(write(inForce?.id ?? '', change)).rejects.toThrow('never changes');
+    await expect(queryAsAdmin('delete from rule_set_versions where id = $1', [inForce?.id])).rejects.toThrow(
+      'never changes',
+    );
     const { rowVersion } = await draftOf(ruleSetId);
     await putInForce(world.admin, { ruleSetId, rowVersion });
     await expect(write(inForce?.id ?? '', { body: '{}' })).rejects.toThrow('never changes');
