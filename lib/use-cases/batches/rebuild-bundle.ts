@@ -2,6 +2,7 @@ import { findBatchById } from '@/db/queries/batches';
 import { lockBundle, updateBundleState } from '@/db/queries/bundles';
 import { enqueueJob } from '@/db/queries/jobs';
 import { withLeague } from '@/db/tenant';
+import { can } from '@/lib/domain/access/permissions';
 import { AppError, notFound } from '@/lib/platform/errors';
 import { assertCan, type ActorContext } from '../context';
 
@@ -12,7 +13,8 @@ export async function rebuildBundle(
 ): Promise<{ queued: true }> {
   return withLeague(ctx.league.id, async (tx) => {
     const batch = await findBatchById(tx, input.batchId);
-    if (!batch) throw notFound('batch');
+    // What is held is the league's own: to a shop it does not exist yet.
+    if (!batch || (batch.state === 'held' && !can(ctx.actor, 'batch.make'))) throw notFound('batch');
     assertCan(ctx.actor, 'batch.read', { shopId: batch.shop.id, what: 'batch' });
     const bundle = await lockBundle(tx, input.batchId);
     if (!bundle) throw notFound('bundle');

@@ -1,13 +1,15 @@
 import { spawn, type ChildProcess } from 'node:child_process';
 import { afterEach, describe, expect, it } from 'vitest';
 import { readStoredFile } from '@/db/queries/stored-files';
-import { buildBundle } from '@/lib/use-cases/batches/build-bundle';
-import { getBatch } from '@/lib/use-cases/batches/get-batch';
+import { handleBuildBundle } from '@/lib/jobs/handlers/build-bundle';
+import { buildBundle, failBundle } from '@/lib/use-cases/batches/build-bundle';
+import { getBatch, getBundleState } from '@/lib/use-cases/batches/get-batch';
 import { holdBatch } from '@/lib/use-cases/batches/hold-batch';
 import { openBundleFile } from '@/lib/use-cases/batches/open-bundle-file';
+import { rebuildBundle } from '@/lib/use-cases/batches/rebuild-bundle';
 import { releaseBatch } from '@/lib/use-cases/batches/release-batch';
 import { sha256 } from '@/lib/platform/ids';
-import { buildTeam, buildWorld, type FurnishedLeague } from '../../factories/league';
+import { buildMember, buildShop, buildTeam, buildWorld, type FurnishedLeague } from '../../factories/league';
 import { makeRequest } from '../../factories/people';
 import { getTestUrls, queryAsAdmin } from '../../support/database';
 
@@ -133,6 +135,23 @@ describe('the bundle of a released batch', () => {
     const middle: Uint8Array[] = [];
     for await (const chunk of file.read({ start: 1000, end: 51_000 })) middle.push(chunk);
     expect(Buffer.concat(middle).equals(whole.subarray(1000, 51_001))).toBe(true);
+    // Around the edges of what is stored together, and at both ends of the file.
+    const edge = 256 * 1024;
+    expect(whole.length).toBeGreaterThan(edge);
+    const cuts = [0, 1, 999, edge - 1, edge, edge + 1, 2 * edge - 1, 2 * edge, whole.length - 1].filter(
+      (cut) => cut < whole.length,
+    );
+    for (const start of cuts) {
+      for (const end of cuts.filter((cut) => cut >= start)) {
+        const pieces: Uint8Array[] = [];
+        for await (const chunk of file.read({ start, end })) pieces.push(chunk);
+        expect([start, end, Buffer.concat(pieces).equals(whole.subarray(start, end + 1))]).toEqual([
+          start,
+          end,
+          true,
+        ]);
+      }
+    }
     const [stored] = await queryAsAdmin<{ id: string }>(
       'select zip_file_id as id from bundles where batch_id = $1',
       [released.batchId],
@@ -144,6 +163,138 @@ describe('the bundle of a released batch', () => {
     }))
       last.push(chunk);
     expect(Buffer.concat(last)).toEqual(whole.subarray(-1));
+  });
+});
+
+describe('a bundle that gave up', () => {
+  const fail = (released: Released) =>
+    failBundle(makeRequest(), { leagueId: released.world.league.id, batchId: released.batchId });
+  const bundleOf = async ({ world, code }: Released) => (await getBatch(world.admin, { code })).bundle;
+
+  it('says so with a reference, and is queued again by its shop or the league, once', async () => {
+    const released = await releaseOne();
+    const { world, batchId } = released;
+    await queryAsAdmin(`select graphile_worker.remove_job($1)`, [`bundle:${batchId}`]);
+    await fail(released);
+    expect(await bundleOf(released)).toMatchObject({
+      state: 'failed',
+      failure: expect.stringMatching(
+        /^The bundle could not be built\. Try again; .* quote [0-9a-f]{8}\.$/,
+      ) as unknown,
+    });
+    await expect(readZip(released)).rejects.toThrow('not ready yet');
+    expect(await rebuildBundle(world.decorator, { batchId })).toEqual({ queued: true });
+    expect(await bundleOf(released)).toMatchObject({ state: 'queued', failure: null, done: 0 });
+    const queued = await queryAsAdmin('select 1 from graphile_worker.jobs where key = $1', [
+      `bundle:${batchId}`,
+    ]);
+    expect(queued).toHaveLength(1);
+    await expect(rebuildBundle(world.admin, { batchId })).rejects.toMatchObject({ code: 'conflict' });
+    expect(await build(released)).toBe('built');
+  });
+
+  it('keeps what it had finished, and comes out as if nothing had happened', async () => {
+    const released = await releaseOne();
+    const ctx = makeRequest();
+    let ids = 0;
+    const broken = {
+      ...ctx,
+      newId: () => {
+        ids += 1;
+        if (ids > 2) throw new Error('the power failed');
+        return ctx.newId();
+      },
+    };
+    await expect(build(released, broken)).rejects.toThrow('the power failed');
+    await fail(released);
+    await rebuildBundle(released.world.admin, { batchId: released.batchId });
+    await build(released);
+    const resumed = sha256(await readZip(released));
+    await queryAsAdmin('delete from bundle_parts');
+    await queryAsAdmin(`update bundles set state = 'queued', zip_file_id = null where batch_id = $1`, [
+      released.batchId,
+    ]);
+    await build(released);
+    expect(sha256(await readZip(released))).toBe(resumed);
+  });
+
+  it('is not what a ready bundle becomes, however late a try gives up', async () => {
+    const released = await releaseOne();
+    await build(released);
+    await fail(released);
+    expect(await bundleOf(released)).toMatchObject({ state: 'ready', failure: null });
+    await expect(rebuildBundle(released.world.admin, { batchId: released.batchId })).rejects.toMatchObject({
+      code: 'conflict',
+    });
+  });
+});
+
+describe('a worker’s last try', () => {
+  it('is the only one that marks the bundle failed; the tries before leave it to the next', async () => {
+    const { world, batchId, code } = await releaseOne();
+    // A snapshot that no document can be made of, written past every guard: the build has to throw.
+    await queryAsAdmin('alter table batches disable trigger user');
+    await queryAsAdmin(`update batches set snapshot = '{}' where id = $1`, [batchId]);
+    await queryAsAdmin('alter table batches enable trigger user');
+    const stateOf = async () =>
+      (await queryAsAdmin<{ state: string }>('select state from bundles where batch_id = $1', [batchId]))[0]
+        ?.state;
+    const run = (attempts: number) =>
+      handleBuildBundle({ leagueId: world.league.id, batchId }, {
+        job: { attempts, max_attempts: 8 },
+      } as never);
+    await expect(run(7)).rejects.toThrow();
+    expect([code, await stateOf()]).not.toEqual([code, 'failed']);
+    await expect(run(8)).rejects.toThrow();
+    expect(await stateOf()).toBe('failed');
+  });
+});
+
+describe('who gets a bundle', () => {
+  it('is the league and the shop it was released to; to every other shop, and by any path, it is not there', async () => {
+    const released = await releaseOne();
+    await build(released);
+    const { world, code, batchId } = released;
+    const shop = await buildShop(world.league);
+    const other = await buildMember(world.league, 'decorator', { shopId: shop.id });
+    const open = (ctx: typeof world.decorator, path: string | null) =>
+      openBundleFile(ctx, { code, path, isFirstRange: true });
+    const parts = (await getBatch(world.decorator, { code })).parts;
+    for (const ctx of [other.ctx, world.manager, world.referee]) {
+      for (const path of [null, ...parts.map((part) => part.path)])
+        await expect(open(ctx, path)).rejects.toMatchObject({ code: 'not-found' });
+      await expect(getBundleState(ctx, { code })).rejects.toMatchObject({ code: 'not-found' });
+      await expect(rebuildBundle(ctx, { batchId })).rejects.toMatchObject({ code: 'not-found' });
+    }
+    for (const path of ['../secrets', '/etc/passwd', '', 'manifest.json/'])
+      await expect(open(world.decorator, path)).rejects.toMatchObject({ code: 'not-found' });
+    await expect(open(world.admin, null)).resolves.toMatchObject({ mediaType: 'application/zip' });
+  });
+
+  it('is noted once for each download, not for each further range', async () => {
+    const released = await releaseOne();
+    await build(released);
+    const { world, code, batchId } = released;
+    await openBundleFile(world.decorator, { code, path: null, isFirstRange: true });
+    await openBundleFile(world.decorator, { code, path: null, isFirstRange: false });
+    expect(await count(`audit_events where subject_id = '${batchId}' and type = 'bundle downloaded'`)).toBe(
+      1,
+    );
+  });
+
+  it('hides from a shop that a batch is being held for it, however its bundle is asked for', async () => {
+    const [world] = await buildWorld();
+    const { code } = await holdBatch(world.admin, {
+      season: world.season.slug,
+      teamIds: [world.teams[1].id],
+      shopId: world.shop.id,
+      promisedOn: null,
+    });
+    const { batch } = await getBatch(world.admin, { code });
+    const ask = (batchId: string) =>
+      rebuildBundle(world.decorator, { batchId }).catch((error: unknown) => (error as Error).message);
+    expect(await ask(batch.id)).toEqual(await ask(crypto.randomUUID()));
+    await expect(getBundleState(world.decorator, { code })).rejects.toMatchObject({ code: 'not-found' });
   });
 });
 
