@@ -124,7 +124,7 @@ describe('the bundle of a released batch', () => {
   });
 
   it('can be read in pieces that join to the whole', async () => {
-    const released = await releaseOne();
+    const released = await releaseOne(99);
     await build(released);
     const whole = await readZip(released);
     const file = await openBundleFile(released.world.decorator, {
