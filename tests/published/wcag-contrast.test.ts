@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { contrastRatio } from '@/lib/domain/colour/contrast-ratio';
+import { numberContrast } from '@/lib/domain/kit/kit-clash';
+import { contrastRatio, writeRatio } from '@/lib/domain/colour/contrast-ratio';
 
 /**
  * Source: W3C, Web Content Accessibility Guidelines 2.2 (definition of contrast ratio), Understanding SC 1.4.11 and
@@ -35,4 +36,23 @@ describe('contrast ratio agrees with W3C', () => {
     expect(contrastRatio('#b1262b', '#0d0f13')).toBeLessThan(3);
     expect(contrastRatio('#e3660e', '#ffffff')).toBeGreaterThan(3);
   });
+
+  /**
+   * Understanding SC 1.4.3 and SC 1.4.11: a ratio is not rounded before it is compared; 4.499 to 1 does not meet 4.5 to
+   * 1, and 2.999 to 1 does not meet 3 to 1. The colours are our own.
+   */
+  it.each([
+    ['#438540', 4.499, '4.5', '4.49 to 1', 'thin'],
+    ['#52a750', 2.999, '3.0', '2.99 to 1', 'poor'],
+  ] as const)(
+    'never rounds before it compares: white on %s, at %d, fails %s',
+    (body, stated, limit, says, verdict) => {
+      const ratio = contrastRatio('#ffffff', body);
+      expect(ratio.toFixed(3)).toBe(stated.toFixed(3));
+      expect(ratio.toFixed(1)).toBe(limit);
+      expect(writeRatio(ratio)).toBe(says);
+      const kit = { name: 'trial', body, sleeves: body, number: '#ffffff', outline: null };
+      expect(numberContrast(kit)).toMatchObject({ ratio, verdict });
+    },
+  );
 });

@@ -16,10 +16,10 @@ export function judgeNumbers(presetId: string, numbers: readonly string[], role 
   return [...new Set(findings.map(({ code }) => code))];
 }
 
-/** The numbers from 0 to 199, with 00 to 09, that one player alone may wear under the preset. */
+/** The numbers from 0 to 999, with 00 to 09, that one player alone may wear under the preset: each label is tried. */
 export function listLegalAlone(presetId: string, role = ''): string[] {
   const zeros = Array.from({ length: 10 }, (_, digit) => `0${digit}`);
-  const plain = Array.from({ length: 200 }, (_, value) => String(value));
+  const plain = Array.from({ length: 1000 }, (_, value) => String(value));
   return [...zeros, ...plain].filter((number) => judgeNumbers(presetId, [number], role).length === 0);
 }
 
