@@ -50,6 +50,23 @@ describe('every way in', () => {
     }
   });
 
+  it('of a server action is in a file of actions: none hides inside a page or a component', () => {
+    for (const file of files.filter((entry) => /\.tsx?$/.test(entry))) {
+      const inside = /^[^\S\n]+['"]use server['"]|^"use server"/m.test(read(file));
+      const elsewhere = /^'use server'/m.test(read(file)) && !file.endsWith('/actions.ts');
+      expect([file, inside, elsewhere]).toEqual([file, false, false]);
+    }
+  });
+
+  it('by a page is behind the sign-in, or on this list', () => {
+    const open = files.filter(
+      (file) => /(^|\/)page\.tsx$/.test(file) && !/await require(League|Person)\(/.test(read(file)),
+    );
+    expect(open.filter((file) => !file.startsWith('(public)/'))).toEqual(['inbox/page.tsx']);
+    // The inbox of a trial installation shows letters that never left the machine; elsewhere it does not exist.
+    expect(read('inbox/page.tsx')).toContain('showNotFound(listInbox())');
+  });
+
   it('of a page behind the sign-in asks who is there, in the page itself and not only in a layout', () => {
     const pages = files.filter((file) =>
       /^(\[league\]|shop|match|account|leagues)\/.*page\.tsx$|^(shop|match|account|leagues)\/page\.tsx$/.test(
