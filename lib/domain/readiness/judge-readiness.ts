@@ -32,6 +32,9 @@ const areaOf: Record<FindingCode, ReadinessArea> = {
   'size-not-offered': 'sizes',
 };
 
+/** The column a kind of finding is counted in. */
+export const findAreaOf = (code: FindingCode): ReadinessArea => areaOf[code];
+
 /** Where a team stands: no list yet or a short one, something to fix, handed in, ready for a batch, or in one. */
 export type ReadinessGroup = 'collecting' | 'blocked' | 'submitted' | 'ready' | 'in a batch';
 export type AreaCounts = { blockers: number; cautions: number };

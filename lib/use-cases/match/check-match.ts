@@ -5,27 +5,14 @@ import { withLeague } from '@/db/tenant';
 import { can } from '@/lib/domain/access/permissions';
 import { chooseKits, compareKits, numberContrast } from '@/lib/domain/kit/kit-clash';
 import type { Player } from '@/lib/domain/roster/player';
+import { findAreaOf } from '@/lib/domain/readiness/judge-readiness';
 import { checkRoster } from '@/lib/domain/rules/check-roster';
-import type { Finding, FindingCode } from '@/lib/domain/rules/finding';
+import type { Finding } from '@/lib/domain/rules/finding';
 import { countOf } from '@/lib/domain/text/count-of';
 import { splitPersonName } from '@/lib/domain/text/person-name';
 import { joinWords } from '@/lib/domain/text/sentence';
 import { notFound } from '@/lib/platform/errors';
 import { assertCan, type ActorContext } from '../context';
-
-/** What concerns an official: numbers. Sizes, spellings and roster limits are the league's own business. */
-const numberCodes: ReadonlySet<FindingCode> = new Set([
-  'number-missing',
-  'number-unreadable',
-  'number-not-allowed',
-  'digit-not-allowed',
-  'too-many-digits',
-  'leading-zero',
-  'zero-and-double-zero',
-  'number-repeated',
-  'number-reserved',
-  'number-needs-role',
-]);
 
 /**
  * Two teams of one division before a match: who wears which number, every number that is twice or not allowed, and
@@ -81,7 +68,10 @@ type Division = Awaited<ReturnType<typeof listDivisionViews>>[number];
 
 function makeSide(team: TeamView, players: readonly Player[], division: Division, mayName: boolean) {
   const { findings } = division.rules ? checkRoster(division.rules.ruleSet, players, []) : { findings: [] };
-  const troubles = findings.filter((finding) => numberCodes.has(finding.code) && finding.severity !== 'note');
+  // What concerns an official: numbers. Sizes, spellings and roster limits are the league's own business.
+  const troubles = findings.filter(
+    (finding) => findAreaOf(finding.code) === 'numbers' && finding.severity !== 'note',
+  );
   return {
     name: team.name,
     slug: team.slug,

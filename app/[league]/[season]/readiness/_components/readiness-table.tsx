@@ -9,12 +9,11 @@ import { DataTable, type DataColumn } from '@/components/ui/data-table';
 import { EmptyState } from '@/components/ui/empty-state';
 import { FilterChips } from '@/components/ui/filter-chips';
 import { StatusText } from '@/components/ui/tag';
-import { TextLink } from '@/components/ui/text-link';
-import { YokeTile } from '@/components/yoke-tile/yoke-tile';
 import type { ReadinessArea, ReadinessGroup } from '@/lib/domain/readiness/judge-readiness';
 import { countOf } from '@/lib/domain/text/count-of';
 import type { ReadyTeam } from '@/lib/use-cases/readiness/list-readiness';
 import { paths } from '@/lib/web/paths';
+import { makeTeamColumns } from '../../_components/team-columns';
 
 type Chip = 'all' | ReadinessGroup;
 const chips: { id: Chip; label: string }[] = [
@@ -92,31 +91,7 @@ export function ReadinessTable({
 
 function makeColumns(league: string, season: string): DataColumn<ReadyTeam>[] {
   return [
-    {
-      id: 'team',
-      header: 'Team',
-      rowHead: true,
-      cell: (team) => (
-        <span className="flex items-center gap-3">
-          <YokeTile kit={team.kit} number="12" size="sm" />
-          <TextLink
-            href={paths.roster(league, season, team.slug)}
-            className="text-ink! font-[620]! no-underline! hover:underline!"
-          >
-            {team.name}
-          </TextLink>
-        </span>
-      ),
-      sortValue: (team) => team.name,
-      searchText: (team) => `${team.name} ${team.playerNames.join(' ')}`,
-    },
-    {
-      id: 'division',
-      header: 'Division',
-      cell: (team) => <span className="text-dusk">{team.division}</span>,
-      sortValue: (team) => team.division,
-      searchText: (team) => team.division,
-    },
+    ...makeTeamColumns(league, season),
     {
       id: 'roster',
       header: 'Roster',

@@ -9,11 +9,10 @@ import { Card } from '@/components/ui/card';
 import { DataTable, type DataColumn } from '@/components/ui/data-table';
 import { EmptyState } from '@/components/ui/empty-state';
 import { FilterChips } from '@/components/ui/filter-chips';
-import { TextLink } from '@/components/ui/text-link';
-import { YokeTile } from '@/components/yoke-tile/yoke-tile';
 import { rosterStates, type RosterState } from '@/lib/domain/roster/roster-state';
 import type { ReadyTeam } from '@/lib/use-cases/readiness/list-readiness';
 import { paths } from '@/lib/web/paths';
+import { makeTeamColumns } from '../../_components/team-columns';
 
 type Chip = 'all' | RosterState;
 
@@ -35,31 +34,7 @@ export function RostersTable({
   const shown = useMemo(() => teams.filter((team) => chip === 'all' || team.state === chip), [teams, chip]);
   const columns = useMemo((): DataColumn<ReadyTeam>[] => {
     return [
-      {
-        id: 'team',
-        header: 'Team',
-        rowHead: true,
-        cell: (team) => (
-          <span className="flex items-center gap-3">
-            <YokeTile kit={team.kit} number="12" />
-            <TextLink
-              href={paths.roster(league, season, team.slug)}
-              className="text-ink! no-underline! hover:underline!"
-            >
-              {team.name}
-            </TextLink>
-          </span>
-        ),
-        sortValue: (team) => team.name,
-        searchText: (team) => `${team.name} ${team.playerNames.join(' ')}`,
-      },
-      {
-        id: 'division',
-        header: 'Division',
-        cell: (team) => <span className="text-dusk">{team.division}</span>,
-        sortValue: (team) => team.division,
-        searchText: (team) => team.division,
-      },
+      ...makeTeamColumns(league, season),
       {
         id: 'players',
         header: 'Players',
