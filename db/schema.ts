@@ -33,6 +33,7 @@ interface LeaguesTable {
   contact_email: string | null;
   ship_to: Generated<string>;
   current_season_id: string | null;
+  last_batch_number: Generated<number>;
   created_at: Time;
   row_version: Generated<number>;
 }

@@ -99,7 +99,7 @@ export async function lockBatch(tx: LeagueTx, batchId: string): Promise<BatchRow
   return findBatchById(tx, batchId);
 }
 
-/** Makes a held batch with the league's next number and answers its code, such as B-07. */
+/** Makes a held batch with the league's next number, never given before, and answers its code, such as B-07. */
 export async function insertBatch(
   tx: LeagueTx,
   batch: {
@@ -111,14 +111,18 @@ export async function insertBatch(
     userId: string;
   },
 ): Promise<string> {
-  // The league's row serialises two batches made at the same moment, so that numbers have no gaps and no twins.
-  await tx.selectFrom('leagues').select('id').where('id', '=', tx.leagueId).forUpdate().execute();
-  const { last } = await tx
-    .selectFrom('batches')
-    .select((eb) => eb.fn.max('number').as('last'))
-    .where('league_id', '=', tx.leagueId)
+  // One statement reads and writes the league's row, so that two batches made at the same moment wait for each other.
+  const { last_batch_number: number } = await tx
+    .updateTable('leagues')
+    .set((eb) => ({
+      last_batch_number: sql<number>`greatest(last_batch_number, ${eb
+        .selectFrom('batches')
+        .select((inner) => inner.fn.coalesce(inner.fn.max('number'), sql<number>`0`).as('last'))
+        .where('league_id', '=', tx.leagueId)}) + 1`,
+    }))
+    .where('id', '=', tx.leagueId)
+    .returning('last_batch_number')
     .executeTakeFirstOrThrow();
-  const number = (last ?? 0) + 1;
   const code = `B-${String(number).padStart(2, '0')}`;
   await tx
     .insertInto('batches')

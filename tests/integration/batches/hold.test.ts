@@ -110,6 +110,13 @@ describe('a batch that is held', () => {
     expect(await hold(ready)).toEqual({ code: 'B-01' });
   });
 
+  it('never gets the code of one that was discarded', async () => {
+    const team = await signedOff();
+    const { code } = await hold(team);
+    await discard(code);
+    expect((await hold(team)).code).not.toBe(code);
+  });
+
   it('keeps a team from being reopened while it holds it', async () => {
     const team = await signedOff();
     const { code } = await hold(team);
