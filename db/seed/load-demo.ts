@@ -236,13 +236,14 @@ async function loadLeague(tx: LeagueTx, league: DemoLeague, clock: Clock): Promi
   await loadBatches(tx, league, { seasonId, shopId, clock, admin, stampAt });
 }
 
-/** What a league would add to a published code: names are wanted on the back, and every garment needs a size. */
+/** What a league would add to a published code: names may be on the back, sizes are asked for, limits hold. */
 function adaptPreset(ruleSet: RuleSet, name: string): RuleSet {
   return {
     ...ruleSet,
     name,
     names: { ...ruleSet.names, onBack: 'allowed', mostLetters: 14, weight: 'caution' },
     sizes: { weight: 'caution' },
+    roster: { ...ruleSet.roster, weight: 'blocker' },
   };
 }
 

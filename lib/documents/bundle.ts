@@ -59,7 +59,7 @@ export function listBundleParts(snapshot: BatchSnapshot): BundlePart[] {
       buildDigitPullList(snapshot, await getType()),
     ),
     ...snapshot.teams.map((team, at) =>
-      makeDataPart(`packing-lists/${slugs[at]}.csv`, csv, `Packing list as data, ${team.name}`, () =>
+      makeDataPart(`packing-lists/${slugs[at]}.csv`, csv, `Packing list, ${team.name}`, () =>
         writeTableCsv(tabulatePackingList(team)),
       ),
     ),
