@@ -46,12 +46,13 @@ test('the check says what is wrong with a file it cannot take, and keeps what wa
   await expect(page.getByLabel('Paste it here')).toHaveValue('keep me');
 });
 
-test('public pages fit a phone and a reader who needs large print', async ({ page }) => {
+test('public pages fit a phone, and axe finds nothing on them', async ({ page }) => {
   for (const width of [360, 390]) {
     await page.setViewportSize({ width, height: 800 });
     for (const path of ['/', '/check', '/sign-in', '/sign-up', '/reset']) {
       await page.goto(path);
       await expectNoSidewaysScroll(page);
+      if (width === 390) await expectAccessible(page);
     }
   }
 });
