@@ -80,8 +80,10 @@ test('every page of a coordinator is accessible and fits from 360 px up', async 
       expect(response?.status()).toBe(200);
       await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
       await expectAccessible(page);
-      await page.setViewportSize({ width: 360, height: 780 });
-      await expectNoSidewaysScroll(page);
+      for (const width of [768, 360]) {
+        await page.setViewportSize({ width, height: 780 });
+        await expectNoSidewaysScroll(page);
+      }
     });
   }
   expect(errors).toEqual([]);

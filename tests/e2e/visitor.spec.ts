@@ -46,8 +46,8 @@ test('the check says what is wrong with a file it cannot take, and keeps what wa
   await expect(page.getByLabel('Paste it here')).toHaveValue('keep me');
 });
 
-test('public pages fit a phone, and axe finds nothing on them', async ({ page }) => {
-  for (const width of [360, 390]) {
+test('public pages fit a phone and a tablet, and axe finds nothing on them', async ({ page }) => {
+  for (const width of [360, 390, 768]) {
     await page.setViewportSize({ width, height: 800 });
     for (const path of ['/', '/check', '/sign-in', '/sign-up', '/reset']) {
       await page.goto(path);

@@ -88,11 +88,13 @@ export function TeamsTable({
         {...(mayChange && {
           rowActions: (team: ListedTeam) => (
             <span className="flex justify-end gap-1">
+              {/* The team's name opens the same page, so a narrow table does without this. */}
               <ButtonLink
                 size="sm"
                 look="quiet"
                 href={paths.team(league, season, team.slug)}
                 aria-label={`Edit ${team.name}`}
+                className="sm:max-lg:hidden"
               >
                 Edit
               </ButtonLink>
@@ -150,6 +152,9 @@ export function TeamsTable({
   );
 }
 
+/** Where the table is narrow the shirt alone shows the colour; its name is still read aloud. */
+const colourName = 'text-dusk sm:max-lg:sr-only';
+
 /** What keeps a team from being removed, as the server would say it; undefined when nothing does. */
 function sayWhyItStays({ batch, state }: ListedTeam): string | undefined {
   if (batch !== null) return `Batch ${batch} holds its roster.`;
@@ -189,7 +194,7 @@ function makeColumns(
       cell: (team) => (
         <span className="flex items-center gap-2">
           <YokeTile kit={team.kits.home} number="12" />
-          <span className="text-dusk">{team.kits.home.name}</span>
+          <span className={colourName}>{team.kits.home.name}</span>
         </span>
       ),
       sortValue: (team) => team.kits.home.name,
@@ -202,7 +207,7 @@ function makeColumns(
         team.kits.away ? (
           <span className="flex items-center gap-2">
             <YokeTile kit={team.kits.away} number="12" />
-            <span className="text-dusk">{team.kits.away.name}</span>
+            <span className={colourName}>{team.kits.away.name}</span>
           </span>
         ) : (
           <span className="text-dusk">none</span>

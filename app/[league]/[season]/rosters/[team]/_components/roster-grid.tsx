@@ -311,7 +311,7 @@ export function RosterGrid({
       : null;
 
   return (
-    <div ref={frame} className={overflows ? 'sm:overflow-x-auto' : undefined}>
+    <div ref={frame} className={overflows ? 'relative sm:overflow-x-auto' : undefined}>
       <p id={`${id}-help`} className="sr-only">
         {editable
           ? 'Arrow keys move. Type or press Enter to edit a cell, Escape to leave it as it was. Tab goes to the next cell; Escape, then Tab leaves the table.'
