@@ -177,7 +177,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
       <p role="status" className="sr-only">
         {search !== '' && `${shown.length} of ${rows.length} found`}
       </p>
-      <div ref={frame} className={overflows ? 'relative sm:overflow-x-auto' : undefined}>
+      <div ref={frame} className={overflows ? 'relative sm:overflow-x-auto' : 'sm:overflow-x-clip'}>
         <table
           role="table"
           aria-rowcount={windowed.on ? shown.length + 1 : undefined}

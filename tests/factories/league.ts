@@ -11,6 +11,7 @@ import { makeSlug } from '@/lib/domain/league/slug';
 import { numberKey } from '@/lib/domain/numbers/number-key';
 import type { Garment, RosterLine } from '@/lib/domain/roster/player';
 import type { RosterState } from '@/lib/domain/roster/roster-state';
+import { makeBlankRuleSet } from '@/lib/domain/rules/blank-rule-set';
 import type { RuleSet } from '@/lib/domain/rules/rule-set';
 import type { ActorContext } from '@/lib/use-cases/context';
 import { makePerson, makeRequest, type MadePerson } from './people';
@@ -44,30 +45,8 @@ export const someGarments: Garment[] = [
 ];
 /** Any number to 99, no two alike in a team; sizes and roles are not asked for. */
 export const someRules: RuleSet = {
-  name: 'Any number',
-  sport: 'basketball',
-  labels: {
-    allowed: '0, 00, 1-99',
-    digits: null,
-    digitsReason: '',
-    mostDigits: 2,
-    leadingZeros: 'refused',
-    zeroAndDoubleZero: 'both and different',
-    weight: 'blocker',
-  },
-  uniqueness: { within: 'team', weight: 'blocker' },
-  reserved: [],
-  reservedWeight: 'blocker',
-  roster: { least: 0, most: 200, requiredRoles: [], weight: 'blocker' },
-  names: {
-    onBack: 'allowed',
-    mostLetters: 12,
-    letters: 'any',
-    sharedSurnameNeedsInitial: false,
-    weight: 'caution',
-  },
+  ...makeBlankRuleSet('Any number', 'basketball'),
   sizes: { weight: 'off' },
-  citations: [],
 };
 
 /** A league in Ireland's time zone, with no season yet. */

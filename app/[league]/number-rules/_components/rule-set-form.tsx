@@ -15,14 +15,14 @@ import { buildNumberRail } from '@/lib/domain/numbers/number-rail';
 import { describeRuleSet } from '@/lib/domain/rules/describe-rule-set';
 import { listRuleSetProblems } from '@/lib/domain/rules/list-rule-set-problems';
 import type { RuleSet, RuleWeight } from '@/lib/domain/rules/rule-set';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { ReservedEditor } from './reserved-editor';
 import { RequiredRolesEditor } from './required-roles-editor';
 
-type Save = (
-  league: string,
-  input: { ruleSetId: string; rowVersion: number | null; ruleSet: RuleSet },
-) => Promise<ActionResult<{ rowVersion: number; version: number }>>;
+type Save = LeagueAction<
+  { ruleSetId: string; rowVersion: number | null; ruleSet: RuleSet },
+  { rowVersion: number; version: number }
+>;
 
 const weights = [
   { value: 'blocker', label: 'blocks the roster' },

@@ -11,7 +11,7 @@ import { Tag } from '@/components/ui/tag';
 import { TextInput } from '@/components/ui/text-input';
 import type { PresetCitation } from '@/lib/domain/rules/catalogue/catalogue-preset';
 import { sayHowKnown, writeCitation } from '@/lib/domain/rules/write-citation';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 
 type Preset = {
@@ -24,10 +24,7 @@ type Preset = {
   checkYourBook: string;
   sentences: string[];
 };
-type Start = (
-  league: string,
-  input: { name: string; sport: string; presetId: string | null },
-) => Promise<ActionResult<{ ruleSetId: string }>>;
+type Start = LeagueAction<{ name: string; sport: string; presetId: string | null }, { ruleSetId: string }>;
 
 const ownRules = 'own';
 

@@ -5,13 +5,13 @@ import { FormFailure } from '@/app/_components/form-failure';
 import { useSubmit } from '@/app/_components/use-submit';
 import { Button } from '@/components/ui/button';
 import { Dialog, DialogClose } from '@/components/ui/dialog';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { TeamPicker, type TeamChoice } from './team-picker';
 
-export type ChangeTeams = (
-  league: string,
-  input: { membershipId: string; teamIds: string[] },
-) => Promise<ActionResult<{ added: string[]; removed: string[] }>>;
+export type ChangeTeams = LeagueAction<
+  { membershipId: string; teamIds: string[] },
+  { added: string[]; removed: string[] }
+>;
 
 /** Names the teams of one manager anew. Mounted while it is open, so that it starts from the teams of now. */
 export function ChangeTeamsDialog({

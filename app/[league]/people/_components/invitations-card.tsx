@@ -10,7 +10,7 @@ import { Notice } from '@/components/ui/notice';
 import { Table, Tbody, Td, Th, Thead, Tr } from '@/components/ui/table';
 import { StatusTag } from '@/components/ui/tag';
 import { useToast } from '@/components/ui/toast';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { describePlace, titleOfRole } from './describe-place';
 
 type Row = {
@@ -23,7 +23,7 @@ type Row = {
   until: string;
   expired: boolean;
 };
-type Act = (league: string, input: { invitationId: string }) => Promise<ActionResult<{ email: string }>>;
+type Act = LeagueAction<{ invitationId: string }, { email: string }>;
 
 /** The invitations nobody has accepted yet: send again, or withdraw. */
 export function InvitationsCard({

@@ -10,7 +10,7 @@ import { SelectField, TextField } from '@/components/ui/field';
 import { RadioGroup } from '@/components/ui/radio-group';
 import { useToast } from '@/components/ui/toast';
 import type { Role } from '@/lib/domain/access/permissions';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { TeamPicker, type TeamChoice } from './team-picker';
 
 type Input = {
@@ -37,7 +37,7 @@ export function InviteDialog({
 }: {
   league: string;
   choices: { teams: readonly TeamChoice[]; shops: readonly { id: string; name: string }[] };
-  invite: (league: string, input: Input) => Promise<ActionResult<Invited>>;
+  invite: LeagueAction<Input, Invited>;
 }) {
   const router = useRouter();
   const showToast = useToast();

@@ -11,7 +11,7 @@ import { IconButton } from '@/components/ui/icon-button';
 import { Menu } from '@/components/ui/menu';
 import { useToast } from '@/components/ui/toast';
 import { roles, type Role } from '@/lib/domain/access/permissions';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { ChangeTeamsDialog, type ChangeTeams } from './change-teams-dialog';
 import { describePlace, titleOfRole } from './describe-place';
 import type { TeamChoice } from './team-picker';
@@ -66,10 +66,7 @@ export function MembersCard({
   members: readonly Member[];
   teams: readonly TeamChoice[];
   changeTeams: ChangeTeams;
-  end: (
-    league: string,
-    input: { membershipId: string },
-  ) => Promise<ActionResult<{ person: string; role: string }>>;
+  end: LeagueAction<{ membershipId: string }, { person: string; role: string }>;
 }) {
   const router = useRouter();
   const showToast = useToast();

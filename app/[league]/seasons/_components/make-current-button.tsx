@@ -4,7 +4,7 @@ import { useRouter } from 'next/navigation';
 import { Button } from '@/components/ui/button';
 import { useToast } from '@/components/ui/toast';
 import { useSubmit } from '@/app/_components/use-submit';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 
 /** Makes a season the one that people land in; choosing another takes it back. */
 export function MakeCurrentButton({
@@ -14,7 +14,7 @@ export function MakeCurrentButton({
 }: {
   league: string;
   season: { id: string; name: string };
-  onChoose: (league: string, input: { seasonId: string }) => Promise<ActionResult<{ name: string }>>;
+  onChoose: LeagueAction<{ seasonId: string }, { name: string }>;
 }) {
   const router = useRouter();
   const showToast = useToast();

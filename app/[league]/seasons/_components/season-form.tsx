@@ -15,7 +15,7 @@ import { listSeasonFaults } from '@/lib/domain/dates/list-season-faults';
 import { listPlanDates } from '@/lib/domain/dates/plan-dates';
 import { localDateTimeSchema, toInstant } from '@/lib/domain/dates/zone';
 import { countOf } from '@/lib/domain/text/count-of';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { ActionResult, LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 
 export type SeasonValues = {
@@ -66,13 +66,11 @@ export function SeasonForm({
   timeZone: string;
   today: string;
   season: { id: string; slug: string; rowVersion: number } | null;
-  onOpen: ((league: string, input: Sent) => Promise<ActionResult<{ slug: string }>>) | null;
-  onChange:
-    | ((
-        league: string,
-        input: { seasonId: string; rowVersion: number; fields: Sent },
-      ) => Promise<ActionResult<{ rowVersion: number }>>)
-    | null;
+  onOpen: LeagueAction<Sent, { slug: string }> | null;
+  onChange: LeagueAction<
+    { seasonId: string; rowVersion: number; fields: Sent },
+    { rowVersion: number }
+  > | null;
 }) {
   const router = useRouter();
   const showToast = useToast();

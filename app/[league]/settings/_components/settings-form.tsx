@@ -11,7 +11,7 @@ import { Notice } from '@/components/ui/notice';
 import { Seam } from '@/components/ui/seam';
 import { SubmitButton } from '@/components/ui/submit-button';
 import { useToast } from '@/components/ui/toast';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 
 type Settings = LeagueValues & { contactEmail: string | null; shipTo: string; rowVersion: number };
 
@@ -25,7 +25,7 @@ export function SettingsForm({
   league: string;
   settings: Settings;
   choices: LeagueChoices;
-  change: (league: string, input: Settings) => Promise<ActionResult<{ rowVersion: number }>>;
+  change: LeagueAction<Settings, { rowVersion: number }>;
 }) {
   const router = useRouter();
   const showToast = useToast();

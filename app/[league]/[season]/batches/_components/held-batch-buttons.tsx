@@ -5,9 +5,9 @@ import { Button } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/confirm-dialog';
 import { useToast } from '@/components/ui/toast';
 import { countOf } from '@/lib/domain/text/count-of';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 
-type Act = (league: string, input: { batchId: string }) => Promise<ActionResult<{ code: string }>>;
+type Act = LeagueAction<{ batchId: string }, { code: string }>;
 
 /** Discard and release for a held batch; both ask once and say what they do. */
 export function HeldBatchButtons({

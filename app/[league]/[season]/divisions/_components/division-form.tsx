@@ -18,7 +18,7 @@ import { describeRuleSet } from '@/lib/domain/rules/describe-rule-set';
 import type { RuleSet } from '@/lib/domain/rules/rule-set';
 import { countOf } from '@/lib/domain/text/count-of';
 import type { DivisionInput } from '@/lib/use-cases/divisions/division-schemas';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { ActionResult, LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 import { GarmentsEditor } from './garments-editor';
 
@@ -43,20 +43,12 @@ type Props = {
   seasonFreezes: string;
   division: { id: string; name: string; rowVersion: number; teams: number } | null;
   start: DivisionValues;
-  onAdd:
-    | ((
-        league: string,
-        input: { season: string; fields: DivisionInput },
-      ) => Promise<ActionResult<{ slug: string }>>)
-    | null;
-  onChange:
-    | ((
-        league: string,
-        input: { divisionId: string; rowVersion: number; fields: DivisionInput },
-      ) => Promise<ActionResult<{ rowVersion: number }>>)
-    | null;
-  onRemove:
-    ((league: string, input: { divisionId: string }) => Promise<ActionResult<{ name: string }>>) | null;
+  onAdd: LeagueAction<{ season: string; fields: DivisionInput }, { slug: string }> | null;
+  onChange: LeagueAction<
+    { divisionId: string; rowVersion: number; fields: DivisionInput },
+    { rowVersion: number }
+  > | null;
+  onRemove: LeagueAction<{ divisionId: string }, { name: string }> | null;
 };
 
 const toCount = (text: string): number => (/^\d+$/.test(text.trim()) ? Number(text) : Number.NaN);

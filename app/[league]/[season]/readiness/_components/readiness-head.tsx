@@ -8,13 +8,13 @@ import { PageHeader } from '@/components/ui/page-header';
 import { useToast } from '@/components/ui/toast';
 import { countOf } from '@/lib/domain/text/count-of';
 import type { ReadinessList, ReadyTeam } from '@/lib/use-cases/readiness/list-readiness';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 
-type Remind = (
-  league: string,
-  input: { season: string; teamIds: string[] },
-) => Promise<ActionResult<{ teams: number; people: number; leftOut: number }>>;
+type Remind = LeagueAction<
+  { season: string; teamIds: string[] },
+  { teams: number; people: number; leftOut: number }
+>;
 
 /** The figures of the season and the two things to do with them: remind managers, make a batch. */
 export function ReadinessHead({

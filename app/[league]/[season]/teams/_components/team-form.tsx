@@ -11,7 +11,7 @@ import { SelectField, TextField } from '@/components/ui/field';
 import { useToast } from '@/components/ui/toast';
 import type { Kit } from '@/lib/domain/kit/kit';
 import type { TeamInput } from '@/lib/use-cases/teams/team-schemas';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { ActionResult, LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 import { KitEditor } from './kit-editor';
 
@@ -32,18 +32,11 @@ export function TeamForm({
   divisions: { id: string; name: string }[];
   team: { id: string; rowVersion: number } | null;
   start: Values;
-  onAdd:
-    | ((
-        league: string,
-        input: { season: string; fields: TeamInput },
-      ) => Promise<ActionResult<{ slug: string }>>)
-    | null;
-  onChange:
-    | ((
-        league: string,
-        input: { teamId: string; rowVersion: number; fields: TeamInput },
-      ) => Promise<ActionResult<{ rowVersion: number }>>)
-    | null;
+  onAdd: LeagueAction<{ season: string; fields: TeamInput }, { slug: string }> | null;
+  onChange: LeagueAction<
+    { teamId: string; rowVersion: number; fields: TeamInput },
+    { rowVersion: number }
+  > | null;
 }) {
   const router = useRouter();
   const showToast = useToast();

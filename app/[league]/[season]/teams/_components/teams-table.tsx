@@ -14,13 +14,10 @@ import { useToast } from '@/components/ui/toast';
 import { YokeTile } from '@/components/yoke-tile/yoke-tile';
 import { countOf } from '@/lib/domain/text/count-of';
 import type { ListedTeam, TeamList } from '@/lib/use-cases/teams/list-teams';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 
-type Remove = (
-  league: string,
-  input: { teamId: string },
-) => Promise<ActionResult<{ name: string; players: number }>>;
+type Remove = LeagueAction<{ teamId: string }, { name: string; players: number }>;
 
 /** Every team with its kits: find, filter by division, sort, open, remove. */
 export function TeamsTable({

@@ -311,12 +311,7 @@ export function RosterGrid({
       : null;
 
   return (
-    <div ref={frame} className={overflows ? 'relative sm:overflow-x-auto' : undefined}>
-      <p id={`${id}-help`} className="sr-only">
-        {editable
-          ? 'Arrow keys move. Type or press Enter to edit a cell, Escape to leave it as it was. Tab goes to the next cell; Escape, then Tab leaves the table.'
-          : 'Arrow keys move between cells. This roster cannot be edited now.'}
-      </p>
+    <div ref={frame} className={overflows ? 'relative sm:overflow-x-auto' : 'sm:overflow-x-clip'}>
       <table
         ref={table}
         role="grid"
@@ -416,6 +411,11 @@ export function RosterGrid({
           )}
         </tbody>
       </table>
+      <p id={`${id}-help`} className="sr-only">
+        {editable
+          ? 'Arrow keys move. Type or press Enter to edit a cell, Escape to leave it as it was. Tab goes to the next cell; Escape, then Tab leaves the table.'
+          : 'Arrow keys move between cells. This roster cannot be edited now.'}
+      </p>
     </div>
   );
 }

@@ -13,12 +13,12 @@ import { formatInstant } from '@/lib/domain/dates/format';
 import { isRosterEditable, judgeRosterStep, type RosterStep } from '@/lib/domain/roster/roster-state';
 import { countOf } from '@/lib/domain/text/count-of';
 import type { RosterPage } from '@/lib/use-cases/rosters/get-roster';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 import { ReasonDialog } from './reason-dialog';
 
 type StepInput = { rosterId: string; revision: number };
-type Step<I> = (league: string, input: I) => Promise<ActionResult<unknown>>;
+type Step<I> = LeagueAction<I, unknown>;
 export type RosterSteps = {
   submit: Step<StepInput>;
   withdraw: Step<StepInput>;

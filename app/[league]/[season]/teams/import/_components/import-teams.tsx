@@ -19,7 +19,7 @@ import { parseTable } from '@/lib/domain/roster/import/parse-table';
 import { readTeams } from '@/lib/domain/roster/import/read-teams';
 import { guessTeamMapping, type TeamColumn, type TeamMapping } from '@/lib/domain/roster/import/team-mapping';
 import { countOf } from '@/lib/domain/text/count-of';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 import { planTeams } from './plan-teams';
 import { TeamPlanTable } from './team-plan-table';
@@ -61,14 +61,8 @@ export function ImportTeams({
   season: string;
   divisions: { id: string; name: string }[];
   known: { name: string; divisionId: string; kits: TeamKits }[];
-  onRead: (
-    league: string,
-    form: FormData,
-  ) => Promise<ActionResult<{ ok: true; tables: Sheet[] } | { ok: false; message: string }>>;
-  onImport: (
-    league: string,
-    input: Sent,
-  ) => Promise<ActionResult<{ added: number; changed: number; unchanged: number }>>;
+  onRead: LeagueAction<FormData, { ok: true; tables: Sheet[] } | { ok: false; message: string }>;
+  onImport: LeagueAction<Sent, { added: number; changed: number; unchanged: number }>;
 }) {
   const router = useRouter();
   const showToast = useToast();

@@ -18,7 +18,7 @@ import { mostPlayersPerRoster, type Garment, type Player } from '@/lib/domain/ro
 import type { RuleSet } from '@/lib/domain/rules/rule-set';
 import { countOf } from '@/lib/domain/text/count-of';
 import type { KeptMapping } from '@/lib/use-cases/rosters/list-mappings';
-import type { ActionResult } from '@/lib/web/action-result';
+import type { LeagueAction } from '@/lib/web/action-result';
 import { ColumnsCard } from './columns-card';
 import { DoubtfulLines, type Decision } from './doubtful-lines';
 import { PreviewCard } from './preview-card';
@@ -69,10 +69,7 @@ export function UploadRoster({
   roster: UploadTarget;
   kept: KeptMapping[];
   readUrl: string;
-  onImport: (
-    league: string,
-    input: Sent,
-  ) => Promise<ActionResult<{ added: number; changed: number; removed: number; unchanged: number }>>;
+  onImport: LeagueAction<Sent, { added: number; changed: number; removed: number; unchanged: number }>;
 }) {
   const router = useRouter();
   const showToast = useToast();
