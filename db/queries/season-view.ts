@@ -1,18 +1,8 @@
 import type { LeagueTx } from '../tenant';
+import type { SeasonFields } from './seasons';
 
 /** A season as the pages use it; dates without a time are calendar days (YYYY-MM-DD) in the league's time zone. */
-export type Season = {
-  id: string;
-  slug: string;
-  name: string;
-  sport: string;
-  rosterOpensOn: string;
-  freezesAt: Date;
-  releaseOn: string | null;
-  handOutOn: string;
-  firstMatchOn: string;
-  rowVersion: number;
-};
+export type Season = SeasonFields & { id: string; slug: string; rowVersion: number };
 
 /** Every season of the league, the latest first match first. */
 export async function listSeasons(tx: LeagueTx): Promise<Season[]> {

@@ -1,6 +1,13 @@
 import { applyEdits, insistOn, type EditConflict } from './apply-edits';
 import { listDifferentCells } from './cells';
-import { invertEdit, playerOfEdit, type CellField, type RosterEdit, type RosterEntry } from './edit';
+import {
+  invertEdit,
+  playerOfEdit,
+  toRosterEntry,
+  type CellField,
+  type RosterEdit,
+  type RosterEntry,
+} from './edit';
 import { foldEdits } from './fold-edits';
 
 /** A conflict that waits for the person at this screen; `lastKnown` is the player as they last saw them. */
@@ -46,7 +53,7 @@ export function openDocument(
 ): RosterDocument {
   const document: RosterDocument = {
     revision: roster.revision,
-    base: roster.players.map(plainEntry),
+    base: roster.players.map(toRosterEntry),
     sending: kept.sending,
     waiting: kept.waiting,
     conflicts: [],
@@ -56,16 +63,6 @@ export function openDocument(
   };
   return settleWaiting(document, []);
 }
-
-const plainEntry = ({ id, name, nameOnBack, number, role, sizes, extra }: RosterEntry): RosterEntry => ({
-  id,
-  name,
-  nameOnBack,
-  number,
-  role,
-  sizes,
-  extra,
-});
 
 /** The players as this screen shows them. */
 export const viewDocument = ({ base, sending, waiting }: RosterDocument): RosterEntry[] =>
@@ -148,7 +145,7 @@ export function acknowledge(document: RosterDocument, answer: RosterAnswer, now:
   const rebased = {
     ...document,
     revision: answer.revision,
-    base: answer.players.map(plainEntry),
+    base: answer.players.map(toRosterEntry),
     sending: [],
   };
   return markChanges(settleWaiting(rebased, answer.conflicts ?? [], before), before, answer, now);
@@ -158,7 +155,7 @@ export function acknowledge(document: RosterDocument, answer: RosterAnswer, now:
 export function receiveNews(document: RosterDocument, answer: RosterAnswer, now: Now): RosterDocument {
   if (answer.revision <= document.revision) return document;
   const before = viewDocument(document);
-  const rebased = { ...document, revision: answer.revision, base: answer.players.map(plainEntry) };
+  const rebased = { ...document, revision: answer.revision, base: answer.players.map(toRosterEntry) };
   return markChanges(settleWaiting(rebased, [], before), before, answer, now);
 }
 

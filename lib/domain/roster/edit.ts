@@ -6,6 +6,17 @@ import { playerLimits, rosterLineSchema, type Player } from './player';
 /** A player while a roster is edited: the order of the list is the order of the roster, so there is no position. */
 export type RosterEntry = Omit<Player, 'position'>;
 
+/** The entry alone, without whatever else the row it comes from carries (who changed it, where it stood). */
+export const toRosterEntry = ({
+  id,
+  name,
+  nameOnBack,
+  number,
+  role,
+  sizes,
+  extra,
+}: RosterEntry): RosterEntry => ({ id, name, nameOnBack, number, role, sizes, extra });
+
 const garmentCodeSchema = z.string().regex(/^[a-z][a-z0-9-]{0,38}$/);
 
 /** One cell of a player: an own field, or the size of one garment by its code. */
@@ -78,15 +89,7 @@ export const incomingExtraSchema = z
 const entrySchema = z
   .object({ id: z.uuid(), extra: incomingExtraSchema })
   .and(incomingLineSchema)
-  .transform(({ id, name, nameOnBack, number, role, sizes, extra }): RosterEntry => ({
-    id,
-    name,
-    nameOnBack,
-    number,
-    role,
-    sizes,
-    extra,
-  }));
+  .transform(toRosterEntry);
 const placeSchema = z.uuid().nullable();
 
 /**

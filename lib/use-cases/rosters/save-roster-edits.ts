@@ -5,7 +5,7 @@ import { touchRoster } from '@/db/queries/rosters';
 import { withLeague } from '@/db/tenant';
 import type { RosterChange } from '@/lib/domain/audit/event';
 import { applyEdits, type EditConflict } from '@/lib/domain/roster/apply-edits';
-import type { RosterEdit, RosterEntry } from '@/lib/domain/roster/edit';
+import { toRosterEntry, type RosterEdit, type RosterEntry } from '@/lib/domain/roster/edit';
 import { foldEdits } from '@/lib/domain/roster/fold-edits';
 import { listPlayerWrites } from '@/lib/domain/roster/list-player-writes';
 import { mostPlayersPerRoster } from '@/lib/domain/roster/player';
@@ -34,7 +34,7 @@ export async function saveRosterEdits(
   return withLeague(ctx.league.id, async (tx) => {
     const { roster, players } = await lockRosterFor(tx, ctx, 'roster.edit', input.rosterId);
     assertEditable(roster);
-    const before: RosterEntry[] = players.map(toEntry);
+    const before: RosterEntry[] = players.map(toRosterEntry);
     const outcome = applyEdits(before, foldEdits(input.edits));
     if (outcome.players.length > Math.max(before.length, mostPlayersPerRoster)) {
       throw new AppError(
@@ -62,16 +62,6 @@ export async function saveRosterEdits(
     return answer(revision, await listPlayers(tx, roster.id), outcome.conflicts, ctx.now);
   });
 }
-
-const toEntry = ({ id, name, nameOnBack, number, role, sizes, extra }: StoredEntry): RosterEntry => ({
-  id,
-  name,
-  nameOnBack,
-  number,
-  role,
-  sizes,
-  extra,
-});
 
 const answer = (
   revision: number,

@@ -6,21 +6,19 @@ import { FormFailure } from '@/app/_components/form-failure';
 import { useSubmit } from '@/app/_components/use-submit';
 import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
-import { Field, SelectField } from '@/components/ui/field';
-import { FileDrop } from '@/components/ui/file-drop';
+import { SelectField } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
-import { Textarea } from '@/components/ui/textarea';
 import { useToast } from '@/components/ui/toast';
 import type { Kit, TeamKits } from '@/lib/domain/kit/kit';
 import { teamFields } from '@/lib/domain/roster/import/heading-words';
 import { listHeadings } from '@/lib/domain/roster/import/find-headings';
-import { fileLimits } from '@/lib/domain/roster/import/limits';
 import { parseTable } from '@/lib/domain/roster/import/parse-table';
 import { readTeams } from '@/lib/domain/roster/import/read-teams';
 import { guessTeamMapping, type TeamColumn, type TeamMapping } from '@/lib/domain/roster/import/team-mapping';
 import { countOf } from '@/lib/domain/text/count-of';
 import type { LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
+import { ListSource } from '../../../_components/list-source';
 import { planTeams } from './plan-teams';
 import { TeamPlanTable } from './team-plan-table';
 
@@ -148,45 +146,17 @@ export function ImportTeams({
           </a>
         }
       >
-        <div className="grid gap-4 lg:grid-cols-2">
-          <FileDrop
-            label={reading ? 'Reading the file' : 'Drop a list here, or pick a file'}
-            accepts={['.csv', '.tsv', '.txt', '.xlsx']}
-            maxBytes={fileLimits.bytes}
-            hint="CSV or XLSX, at most 5 MB."
-            file={file}
-            onFile={(picked) => void readFile(picked)}
-          />
-          <div className="grid content-start gap-2">
-            <Field label="Or paste cells from a spreadsheet">
-              {(wiring) => (
-                <Textarea
-                  {...wiring}
-                  rows={4}
-                  className="font-mono"
-                  value={text}
-                  onChange={(event) => setText(event.target.value)}
-                />
-              )}
-            </Field>
-            <div>
-              <Button
-                size="sm"
-                onClick={readPaste}
-                unavailable={text.trim() === '' ? 'Paste the cells first.' : undefined}
-              >
-                Read the paste
-              </Button>
-            </div>
-          </div>
-        </div>
-        {refusal !== undefined && (
-          <div className="mt-4">
-            <Notice tone="stop" live="assertive">
-              {refusal}
-            </Notice>
-          </div>
-        )}
+        <ListSource
+          accepts={['.csv', '.tsv', '.txt', '.xlsx']}
+          hint="CSV or XLSX, at most 5 MB."
+          busy={reading}
+          file={file}
+          onFile={(picked) => void readFile(picked)}
+          text={text}
+          onText={setText}
+          onReadPaste={readPaste}
+          refusal={refusal}
+        />
       </Card>
       {rows && mapping && plan && (
         <>

@@ -1,16 +1,12 @@
 'use client';
 
 import { useState } from 'react';
-import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
-import { Field, SelectField } from '@/components/ui/field';
-import { FileDrop } from '@/components/ui/file-drop';
-import { Notice } from '@/components/ui/notice';
-import { Textarea } from '@/components/ui/textarea';
+import { SelectField } from '@/components/ui/field';
 import { encodingChoices, type EncodingLabel } from '@/lib/domain/roster/import/decode-text';
-import { fileLimits } from '@/lib/domain/roster/import/limits';
 import type { Delimiter } from '@/lib/domain/roster/import/parse-table';
 import { sampleFiles } from '@/lib/domain/roster/import/samples';
+import { ListSource } from '../../../../_components/list-source';
 import { bringFile, bringPaste, bringText, type Brought, type Source } from './source';
 
 /** Where the list comes from: a file dropped or picked, or cells pasted; and how its letters were read. */
@@ -60,46 +56,17 @@ export function SourceCard({
   };
   return (
     <Card title="The list">
-      <div className="grid gap-4 lg:grid-cols-2">
-        <FileDrop
-          label={busy ? 'Reading the file' : 'Drop a list here, or pick a file'}
-          accepts={['.csv', '.tsv', '.txt', '.xlsx', '.xls', '.xlsm', '.ods', '.numbers', '.pdf']}
-          maxBytes={fileLimits.bytes}
-          hint="CSV or XLSX, at most 5 MB and 2,000 rows. Formulas are never worked out."
-          file={file}
-          onFile={(picked) => void pick(picked)}
-        />
-        <div className="grid content-start gap-2">
-          <Field label="Or paste cells from a spreadsheet">
-            {(wiring) => (
-              <Textarea
-                {...wiring}
-                rows={4}
-                spellCheck={false}
-                className="font-mono"
-                value={text}
-                onChange={(event) => setText(event.target.value)}
-              />
-            )}
-          </Field>
-          <div>
-            <Button
-              size="sm"
-              onClick={() => take(bringPaste(text))}
-              unavailable={text.trim() === '' ? 'Paste the cells first.' : undefined}
-            >
-              Read the paste
-            </Button>
-          </div>
-        </div>
-      </div>
-      {refusal !== undefined && (
-        <div className="mt-4">
-          <Notice tone="stop" live="assertive" title="This list cannot be read">
-            {refusal}
-          </Notice>
-        </div>
-      )}
+      <ListSource
+        accepts={['.csv', '.tsv', '.txt', '.xlsx', '.xls', '.xlsm', '.ods', '.numbers', '.pdf']}
+        hint="CSV or XLSX, at most 5 MB and 2,000 rows. Formulas are never worked out."
+        busy={busy}
+        file={file}
+        onFile={(picked) => void pick(picked)}
+        text={text}
+        onText={setText}
+        onReadPaste={() => take(bringPaste(text))}
+        refusal={refusal}
+      />
       {source?.text && (
         <div className="mt-4 flex flex-wrap items-end gap-4">
           <SelectField
