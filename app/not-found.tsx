@@ -1,3 +1,4 @@
+import { findEntryLink } from '@/app/_components/entry-link';
 import { PublicShell } from '@/components/app-shell/public-shell';
 import { ButtonLink } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty-state';
@@ -5,9 +6,9 @@ import { paths } from '@/lib/web/paths';
 
 export const metadata = { title: 'No such page' };
 
-export default function NotFound() {
+export default async function NotFound() {
   return (
-    <PublicShell home={paths.home()} links={[{ href: paths.signIn(), label: 'Sign in' }]}>
+    <PublicShell home={paths.home()} links={[await findEntryLink()]}>
       <h1 className="sr-only">No such page</h1>
       <EmptyState
         title="There is no page at this address"

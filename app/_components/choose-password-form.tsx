@@ -1,6 +1,6 @@
 'use client';
 
-import { useRef, useState, type FormEvent } from 'react';
+import { useRef, type FormEvent } from 'react';
 import { passwordLimits } from '@/lib/domain/access/password-policy';
 import { SubmitButton } from '@/components/ui/submit-button';
 import type { ActionResult } from '@/lib/web/action-result';
@@ -28,13 +28,12 @@ export function ChoosePasswordForm({
   onward: string;
   button: string;
 }) {
-  const [entering, setEntering] = useState(false);
   const password = useRef('');
   const { submit, pending, failure, fields } = useSubmit(choose, async (data) => {
-    setEntering(true);
     // If that fails, the page it leads to is the sign-in page, and it says so there.
     await enter(data.email, password.current);
     window.location.assign(onward);
+    return 'leaving' as const;
   });
 
   const send = (event: FormEvent<HTMLFormElement>) => {
@@ -54,7 +53,7 @@ export function ChoosePasswordForm({
         hint={passwordHint}
         error={fields['password']}
       />
-      <SubmitButton pending={pending || entering} wide>
+      <SubmitButton pending={pending} wide>
         {button}
       </SubmitButton>
     </form>

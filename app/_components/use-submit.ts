@@ -3,16 +3,18 @@
 import { useState } from 'react';
 import type { ActionResult } from '@/lib/web/action-result';
 
+type Outcome = 'leaving' | undefined | void;
 type Failure = { code: string; message: string; fields: Record<string, string> };
 
 /**
  * Sends a form to an action once at a time and keeps what went wrong, so that the page can say it beside the inputs.
- * The inputs stay as they are: this never resets a form. `onDone` runs after a success and may leave the page; the
- * button stays busy until it has.
+ * The inputs stay as they are: this never resets a form. `onDone` runs after a success. When it sends the
+ * person to another page it answers `leaving`: the button then stays busy, so that nothing is sent twice while that page
+ * loads.
  */
 export function useSubmit<I extends unknown[], T>(
   action: (...input: I) => Promise<ActionResult<T>>,
-  onDone: (data: T) => void | Promise<void>,
+  onDone: (data: T) => Outcome | Promise<Outcome>,
 ) {
   const [pending, setPending] = useState(false);
   const [failure, setFailure] = useState<Failure>();
@@ -21,9 +23,10 @@ export function useSubmit<I extends unknown[], T>(
     if (pending) return;
     setPending(true);
     setFailure(undefined);
+    let leaving = false;
     try {
       const result = await action(...input);
-      if (result.ok) await onDone(result.data);
+      if (result.ok) leaving = (await onDone(result.data)) === 'leaving';
       else setFailure(result.error);
     } catch {
       setFailure({
@@ -33,7 +36,7 @@ export function useSubmit<I extends unknown[], T>(
         fields: {},
       });
     } finally {
-      setPending(false);
+      if (!leaving) setPending(false);
     }
   };
 

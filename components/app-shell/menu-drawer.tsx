@@ -1,6 +1,7 @@
 'use client';
 
 import { Dialog } from 'radix-ui';
+import { usePathname } from 'next/navigation';
 import { useState, type ReactNode } from 'react';
 import { Icon } from '@/components/ui/icon';
 import { overlayLook } from '@/components/ui/dialog';
@@ -8,9 +9,11 @@ import { Wordmark } from '@/components/yoke-tile/raglan-mark';
 
 /** The side panel as a drawer, where there is no room for it. Children is a function that gets how to close it. */
 export function MenuDrawer({ children }: { children: (close: () => void) => ReactNode }) {
-  const [open, setOpen] = useState(false);
+  // Open over the page it was opened on: whatever leads to another page closes it.
+  const here = usePathname();
+  const [openAt, setOpenAt] = useState<string>();
   return (
-    <Dialog.Root open={open} onOpenChange={setOpen}>
+    <Dialog.Root open={openAt === here} onOpenChange={(open) => setOpenAt(open ? here : undefined)}>
       <Dialog.Trigger
         aria-label="Menu"
         className="touch-square rounded-control hover:bg-hem/60 -ml-2 inline-flex items-center justify-center"
@@ -34,7 +37,7 @@ export function MenuDrawer({ children }: { children: (close: () => void) => Reac
               <Icon name="close" size={18} />
             </Dialog.Close>
           </div>
-          {children(() => setOpen(false))}
+          {children(() => setOpenAt(undefined))}
         </Dialog.Content>
       </Dialog.Portal>
     </Dialog.Root>

@@ -49,10 +49,15 @@ export function BundlePanel({
   if (data.state === 'failed') {
     const retry = async () => {
       setRetrying(true);
-      const answer = await onRetry({ batchId });
-      setFailure(answer.ok ? undefined : answer.error.message);
-      setRetrying(false);
-      await refetch();
+      try {
+        const answer = await onRetry({ batchId });
+        setFailure(answer.ok ? undefined : answer.error.message);
+        await refetch();
+      } catch {
+        setFailure('That did not reach the server. Check the connection and try again.');
+      } finally {
+        setRetrying(false);
+      }
     };
     return (
       <Notice
@@ -70,9 +75,14 @@ export function BundlePanel({
     );
   }
   return (
-    <div className="p-4" role="status">
+    <div className="p-4">
       <Progress
-        label={data.state === 'queued' ? 'The bundle waits for a worker' : `Making: ${data.doing}`}
+        label={
+          // Read aloud when the work itself changes, not with every count.
+          <span role="status">
+            {data.state === 'queued' ? 'The bundle waits for a worker' : `Making: ${data.doing}`}
+          </span>
+        }
         done={data.done}
         total={data.total === 0 ? null : data.total}
         unit="steps"

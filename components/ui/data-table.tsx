@@ -105,9 +105,8 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   });
   const shown = table.getRowModel().rows;
 
-  const frame = useRef<HTMLDivElement>(null);
   const body = useRef<HTMLTableSectionElement>(null);
-  const overflows = useOverflow(frame);
+  const { ref: frame, overflows } = useOverflow();
   const windowed = useWindowRows(shown.length, body);
   const [active, setActive] = useState(0);
   const reachable = Math.min(active, Math.max(0, shown.length - 1));

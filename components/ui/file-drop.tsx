@@ -29,8 +29,7 @@ const listEndings = (accepts: readonly string[]) =>
 
 /**
  * A place to drop or pick one file; keyboard and screen reader use the file input inside. Props: `label` ("Drop a
- * roster here, or pick a file"), `accepts` endings, `maxBytes`, `hint`, `file` chosen (or null), `onFile(file | null)`,
- * `error` found later, `name` for forms.
+ * roster here, or pick a file"), `accepts` endings, `maxBytes`, `hint`, `file` chosen (or null), `onFile(file | null)`.
  */
 export function FileDrop({
   label,
@@ -39,8 +38,6 @@ export function FileDrop({
   hint,
   file,
   onFile,
-  error,
-  name,
 }: {
   label: string;
   accepts: readonly string[];
@@ -48,14 +45,11 @@ export function FileDrop({
   hint?: ReactNode;
   file: File | null;
   onFile: (file: File | null) => void;
-  error?: string | undefined;
-  name?: string | undefined;
 }) {
   const id = useId();
   const input = useRef<HTMLInputElement>(null);
   const [over, setOver] = useState(false);
   const [refusal, setRefusal] = useState<string>();
-  const wrong = refusal ?? error;
 
   const take = (files: FileList | null) => {
     const first = files?.[0];
@@ -64,8 +58,8 @@ export function FileDrop({
     const reason = many ?? judgeFile(first, accepts, maxBytes);
     setRefusal(reason ?? undefined);
     onFile(reason === null ? first : null);
-    // The same file can be picked again after it was put right.
-    if (reason !== null && input.current !== null) input.current.value = '';
+    // The same file can be picked again after it was put right, or when it did not get through.
+    if (input.current !== null) input.current.value = '';
   };
   const drop = (event: DragEvent) => {
     event.preventDefault();
@@ -74,7 +68,6 @@ export function FileDrop({
   };
   const clear = () => {
     setRefusal(undefined);
-    if (input.current !== null) input.current.value = '';
     onFile(null);
     input.current?.focus();
   };
@@ -92,7 +85,7 @@ export function FileDrop({
           'rounded-card relative grid min-h-32 place-items-center border-[1.5px] border-dashed px-4 py-6 text-center focus-within:outline-2 focus-within:outline-offset-2 focus-within:outline-damson',
           over
             ? 'border-damson bg-damson-wash'
-            : wrong === undefined
+            : refusal === undefined
               ? 'border-thread bg-card'
               : 'border-stop bg-card',
         )}
@@ -103,11 +96,10 @@ export function FileDrop({
         <input
           ref={input}
           id={id}
-          name={name}
           type="file"
           accept={accepts.join(',')}
-          aria-describedby={joinClasses(`${id}-hint`, wrong !== undefined && `${id}-error`)}
-          aria-invalid={wrong === undefined ? undefined : true}
+          aria-describedby={joinClasses(`${id}-hint`, refusal !== undefined && `${id}-error`)}
+          aria-invalid={refusal === undefined ? undefined : true}
           onChange={(event) => take(event.target.files)}
           className="sr-only"
         />
@@ -137,7 +129,9 @@ export function FileDrop({
       <p id={`${id}-hint`} className="type-small text-dusk">
         {hint ?? `${listEndings(accepts)}, up to ${formatBytes(maxBytes)}.`}
       </p>
-      <div role="status">{wrong !== undefined && <FieldError id={`${id}-error`}>{wrong}</FieldError>}</div>
+      <div role="status">
+        {refusal !== undefined && <FieldError id={`${id}-error`}>{refusal}</FieldError>}
+      </div>
     </div>
   );
 }

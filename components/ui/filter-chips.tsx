@@ -24,7 +24,7 @@ export function FilterChips<Id extends string>({
           aria-pressed={chip.id === chosen}
           onClick={() => onChoose(chip.id)}
           className={joinClasses(
-            'touch type-small sm:pointer-fine:min-h-8 rounded-full border px-3 py-0.5 font-[560] whitespace-nowrap',
+            'touch type-small sm:pointer-fine:min-h-8 rounded-full border px-3 py-0.5 max-w-full text-left font-[560] break-words',
             chip.id === chosen
               ? 'border-damson bg-damson-wash text-damson-deep'
               : 'border-hem bg-card text-ink hover:border-thread',

@@ -31,7 +31,7 @@ export function StatusText({ tone, children }: { tone: Tone; children: ReactNode
 /** A plain label for things that are not a status, such as a role or a kind of file. */
 export function Tag({ children }: { children: ReactNode }) {
   return (
-    <span className="type-fine border-hem bg-card text-dusk inline-flex min-h-6 items-center rounded border px-2 py-0.5 font-[560] whitespace-nowrap">
+    <span className="type-fine border-hem bg-card text-dusk inline-flex min-h-6 items-center rounded border px-2 py-0.5 max-w-full font-[560] break-words">
       {children}
     </span>
   );

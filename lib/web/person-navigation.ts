@@ -1,6 +1,7 @@
 import type { Person } from '@/lib/domain/league/league';
 import { can, type Role } from '@/lib/domain/access/permissions';
 import { countOf } from '@/lib/domain/text/count-of';
+import { capitalise } from '@/lib/domain/text/sentence';
 import { paths } from './paths';
 
 type Group = { title: string; items: { href: string; label: string }[] };
@@ -31,7 +32,7 @@ export function describePerson(person: Person): string {
   const held = new Set<Role>(person.leagues.flatMap(({ actor }) => actor.roles));
   if (held.size === 0) return 'no league yet';
   const roles = [...held].join(', ');
-  return `${roles.charAt(0).toUpperCase()}${roles.slice(1)} in ${countOf(person.leagues.length, 'league')}`;
+  return `${capitalise(roles)} in ${countOf(person.leagues.length, 'league')}`;
 }
 
 /** The lines of the person's own menu. */

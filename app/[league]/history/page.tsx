@@ -1,5 +1,5 @@
 import type { Metadata } from 'next';
-import { ButtonLink } from '@/components/ui/button';
+import { ButtonLink, DownloadLink } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { EmptyState } from '@/components/ui/empty-state';
 import { PageHeader } from '@/components/ui/page-header';
@@ -32,22 +32,16 @@ export default async function HistoryPage({ params, searchParams }: Props) {
         title="History"
         subtitle="What was done in this league, by whom and when. Nothing here is ever changed or removed."
         actions={
-          <ButtonLink
+          <DownloadLink
             icon="download"
-            prefetch={false}
             href={`${paths.api.historyCsv(league)}${writeQuery({ ...query, before: null })}`}
           >
             Download {narrowed ? 'these' : 'all'} as CSV
-          </ButtonLink>
+          </DownloadLink>
         }
       />
       <Card flush>
-        <HistoryFilters
-          key={`${query.kind ?? ''} ${query.search}`}
-          kind={query.kind}
-          search={query.search}
-          here={here}
-        />
+        <HistoryFilters kind={query.kind} search={query.search} here={here} />
         {lines.length === 0 ? (
           <EmptyState
             title={narrowed ? 'Nothing in the history fits' : 'Nothing has happened yet'}

@@ -5,6 +5,7 @@ import { BatchStateTag } from '@/components/status/batch-state-tag';
 import { Card } from '@/components/ui/card';
 import { EmptyState } from '@/components/ui/empty-state';
 import { FilterChips } from '@/components/ui/filter-chips';
+import { foldForSearch, holdsEveryWord } from '@/components/ui/fold-for-search';
 import { PageHeader } from '@/components/ui/page-header';
 import { SearchInput } from '@/components/ui/search-input';
 import { Table, Tbody, Td, Th, Thead, Tr } from '@/components/ui/table';
@@ -34,11 +35,10 @@ export function ShopBatches({ batches }: { batches: ShopBatch[] }) {
   const [chip, setChip] = useState<Chip>('all');
   const [find, setFind] = useState('');
   const count = (id: Chip) => batches.filter((batch) => id === 'all' || chipOf(batch) === id).length;
-  const wanted = find.trim().toLocaleLowerCase();
   const shown = batches.filter(
     (batch) =>
       (chip === 'all' || chipOf(batch) === chip) &&
-      `${batch.code} ${batch.leagueName} ${batch.shop}`.toLocaleLowerCase().includes(wanted),
+      holdsEveryWord(foldForSearch(`${batch.code} ${batch.leagueName} ${batch.shop}`), find),
   );
   const leagues = new Set(batches.map((batch) => batch.leagueSlug)).size;
   return (

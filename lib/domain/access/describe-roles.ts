@@ -1,7 +1,8 @@
+import { capitalise } from '../text/sentence';
 import { roles, type Role } from './permissions';
 
 /** What somebody is in a league, in one line: "League admin, referee"; roles stand in the order of the table. */
 export function describeRoles(held: readonly Role[]): string {
   const line = roles.filter((role) => held.includes(role)).join(', ');
-  return `${line.charAt(0).toUpperCase()}${line.slice(1)}`;
+  return capitalise(line);
 }

@@ -1,6 +1,7 @@
 import { colourDifference } from '../colour/colour-difference';
 import { contrastRatio, writeRatio } from '../colour/contrast-ratio';
 import { type Kit, type KitKind, type TeamKits } from './kit';
+import { capitalise } from '../text/sentence';
 
 /** Below this CIEDE2000 difference two bodies clash, below the other they are close. Common practice, no source. */
 export const clashBelow = 20;
@@ -125,5 +126,3 @@ function sayNoneClear(pairings: readonly KitPairing[]): string {
   const best = rest.reduce((a, b) => (b.comparison.deltaE > a.comparison.deltaE ? b : a), first);
   return `No two kits of these teams are clearly different. The least alike are ${best.homeKit.name} for the home team and ${best.awayKit.name} for the away team; bring bibs.`;
 }
-
-const capitalise = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

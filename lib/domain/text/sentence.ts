@@ -15,3 +15,6 @@ export function joinWords(words: readonly string[], conjunction: 'and' | 'or' = 
   if (words.length < 2) return last;
   return `${words.slice(0, -1).join(', ')} ${conjunction} ${last}`;
 }
+
+/** The text with its first letter as a capital. */
+export const capitalise = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

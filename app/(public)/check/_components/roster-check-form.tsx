@@ -14,6 +14,7 @@ import { readRoster } from '@/lib/domain/roster/import/read-roster';
 import type { CheckSummary, Finding } from '@/lib/domain/rules/finding';
 import { countOf } from '@/lib/domain/text/count-of';
 import { sayHowKnown, writeCitation } from '@/lib/domain/rules/write-citation';
+import { capitalise } from '@/lib/domain/text/sentence';
 import { CheckResult } from './check-result';
 import type { Checked, CheckPreset } from './checked';
 import { readFile, readPaste, type Reading, type ReadWorkbook } from './read-file';
@@ -88,7 +89,11 @@ export function RosterCheckForm({
                   spellCheck={false}
                   className="font-mono"
                   value={text}
-                  onChange={(event) => setText(event.target.value)}
+                  onChange={(event) => {
+                    setText(event.target.value);
+                    // The list is one or the other: what was brought last.
+                    setFile(null);
+                  }}
                 />
               )}
             </Field>
@@ -146,6 +151,7 @@ export function RosterCheckForm({
             <Button
               look="quiet"
               wide
+              pending={pending}
               onClick={() => {
                 setFile(null);
                 setText(sample);
@@ -165,8 +171,6 @@ export function RosterCheckForm({
     </>
   );
 }
-
-const capitalise = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 async function checkList(
   url: string,

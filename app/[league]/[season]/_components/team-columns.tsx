@@ -15,7 +15,7 @@ export const makeTeamColumns = (league: string, season: string): DataColumn<Read
         <YokeTile kit={team.kit} number="12" />
         <TextLink
           href={paths.roster(league, season, team.slug)}
-          className="text-ink! font-[620]! no-underline! hover:underline!"
+          className="text-ink! min-w-0 font-[620]! break-words no-underline! hover:underline!"
         >
           {team.name}
         </TextLink>

@@ -6,11 +6,12 @@ import { Button } from '@/components/ui/button';
 import { FilterChips } from '@/components/ui/filter-chips';
 import { SearchInput } from '@/components/ui/search-input';
 import { eventKinds, type EventKind } from '@/lib/domain/audit/event-kinds';
+import { capitalise } from '@/lib/domain/text/sentence';
 import { writeQuery } from './write-query';
 
 const chips = [
   { id: 'all' as const, label: 'All' },
-  ...eventKinds.map((id) => ({ id, label: `${id.charAt(0).toUpperCase()}${id.slice(1)}` })),
+  ...eventKinds.map((id) => ({ id, label: capitalise(id) })),
 ];
 
 /** Narrows the history; what is chosen stands in the address, so that it can be kept and sent on. */
@@ -26,6 +27,12 @@ export function HistoryFilters({
   const router = useRouter();
   const [pending, startTransition] = useTransition();
   const [words, setWords] = useState(search);
+  // The way back in the browser changes the address, and what is typed here follows it.
+  const [seen, setSeen] = useState(search);
+  if (seen !== search) {
+    setSeen(search);
+    setWords(search);
+  }
   const show = (nextKind: EventKind | null, nextWords: string) =>
     startTransition(() =>
       router.push(`${here}${writeQuery({ kind: nextKind, search: nextWords.trim(), before: null })}`),

@@ -1,7 +1,8 @@
 'use client';
 
+import { useWritten } from '@/app/_components/use-written';
 import { Button } from '@/components/ui/button';
-import { Field, FieldError } from '@/components/ui/field';
+import { Field, FieldError, TextField } from '@/components/ui/field';
 import { IconButton } from '@/components/ui/icon-button';
 import { TextInput } from '@/components/ui/text-input';
 import type { Reserved } from '@/lib/domain/rules/rule-set';
@@ -39,16 +40,7 @@ export function ReservedEditor({
               />
             )}
           </Field>
-          <Field label="Only for (empty: nobody)">
-            {(wiring) => (
-              <TextInput
-                {...wiring}
-                defaultValue={entry.roles.join(', ')}
-                maxLength={200}
-                onChange={(event) => set(index, { roles: splitWords(event.target.value) })}
-              />
-            )}
-          </Field>
+          <RolesField roles={entry.roles} onChange={(roles) => set(index, { roles })} />
           <Field label="Reason">
             {(wiring) => (
               <TextInput
@@ -73,6 +65,18 @@ export function ReservedEditor({
         </Button>
       </div>
     </div>
+  );
+}
+
+function RolesField({ roles, onChange }: { roles: string[]; onChange: (roles: string[]) => void }) {
+  const written = useWritten(roles, { read: splitWords, write: (words) => words.join(', ') }, onChange);
+  return (
+    <TextField
+      label="Only for (empty: nobody)"
+      value={written.value}
+      maxLength={200}
+      onChange={(event) => written.type(event.target.value)}
+    />
   );
 }
 

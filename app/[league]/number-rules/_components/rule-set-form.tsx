@@ -3,6 +3,7 @@
 import { useRouter } from 'next/navigation';
 import { useState, type ReactNode } from 'react';
 import { NumberRail } from '@/components/number-rail/number-rail';
+import { useSubmit } from '@/app/_components/use-submit';
 import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { Checkbox } from '@/components/ui/checkbox';
@@ -53,42 +54,29 @@ export function RuleSetForm({
   const showToast = useToast();
   const [rules, setRules] = useState(start);
   const [rowVersion, setRowVersion] = useState(startVersion);
-  const [pending, setPending] = useState(false);
-  const [failure, setFailure] = useState<{ message: string; fields: Record<string, string> }>();
   const problems = listRuleSetProblems(rules);
   const problemOf = (part: 'labels' | 'reserved' | 'roster') =>
     problems.find((problem) => problem.part === part)?.message;
   const change = <K extends keyof RuleSet>(part: K, value: Partial<RuleSet[K]>) =>
     setRules({ ...rules, [part]: { ...(rules[part] as object), ...value } });
 
-  const save = async () => {
-    setPending(true);
-    setFailure(undefined);
-    try {
-      const answer = await onSave(league, { ruleSetId, rowVersion, ruleSet: rules });
-      if (answer.ok) {
-        setRowVersion(answer.data.rowVersion);
-        showToast({ tone: 'set', title: `Draft ${answer.data.version} is saved; it is not in force yet` });
-        router.push(`${path}?version=${answer.data.version}`);
-        router.refresh();
-        return;
-      }
-      setFailure(answer.error);
-    } catch {
-      setFailure({
-        message: 'That did not reach the server. Your entries are still here; try again.',
-        fields: {},
-      });
-    }
-    setPending(false);
-  };
+  const { submit, pending, failure, fields } = useSubmit(
+    () => onSave(league, { ruleSetId, rowVersion, ruleSet: rules }),
+    (saved) => {
+      setRowVersion(saved.rowVersion);
+      showToast({ tone: 'set', title: `Draft ${saved.version} is saved; it is not in force yet` });
+      router.push(`${path}?version=${saved.version}`);
+      router.refresh();
+      return 'leaving';
+    },
+  );
 
   return (
     <form
       className="grid items-start gap-5 xl:grid-cols-[minmax(0,1fr)_24rem]"
       onSubmit={(event) => {
         event.preventDefault();
-        void save();
+        void submit();
       }}
     >
       <div className="grid gap-5">
@@ -112,7 +100,7 @@ export function RuleSetForm({
             label="Digits allowed"
             hint="Empty for all ten."
             required={false}
-            error={failure?.fields['ruleSet.labels.digits']}
+            error={fields['ruleSet.labels.digits']}
           >
             {(wiring) => (
               <TextInput

@@ -2,8 +2,10 @@
 
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
+import { useSubmit } from '@/app/_components/use-submit';
 import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
+import { foldForSearch, holdsEveryWord } from '@/components/ui/fold-for-search';
 import { Field } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
 import { SearchInput } from '@/components/ui/search-input';
@@ -43,44 +45,31 @@ export function StartRuleSetForm({
   const [chosen, setChosen] = useState(presets[0]?.id ?? ownRules);
   const [name, setName] = useState<string>();
   const [sport, setSport] = useState('');
-  const [pending, setPending] = useState(false);
-  const [failure, setFailure] = useState<{ message: string; fields: Record<string, string> }>();
   const preset = presets.find((entry) => entry.id === chosen);
-  const wanted = find.trim().toLowerCase();
   const shown = presets.filter((entry) =>
-    `${entry.sport} ${entry.title} ${entry.summary}`.toLowerCase().includes(wanted),
+    holdsEveryWord(foldForSearch(`${entry.sport} ${entry.title} ${entry.summary}`), find),
   );
   const givenName = name ?? preset?.title ?? '';
 
-  const start = async () => {
-    setPending(true);
-    setFailure(undefined);
-    try {
-      const answer = await onStart(league, {
+  const { submit, pending, failure, fields } = useSubmit(
+    () =>
+      onStart(league, {
         name: givenName,
         sport: preset?.sport ?? sport,
         presetId: preset?.id ?? null,
-      });
-      if (answer.ok) {
-        router.push(`${paths.numberRuleSet(league, answer.data.ruleSetId)}/edit`);
-        return;
-      }
-      setFailure(answer.error);
-    } catch {
-      setFailure({
-        message: 'That did not reach the server. Your choice is still here; try again.',
-        fields: {},
-      });
-    }
-    setPending(false);
-  };
+      }),
+    ({ ruleSetId }) => {
+      router.push(`${paths.numberRuleSet(league, ruleSetId)}/edit`);
+      return 'leaving';
+    },
+  );
 
   return (
     <form
       className="grid items-start gap-5 lg:grid-cols-[20rem_minmax(0,1fr)]"
       onSubmit={(event) => {
         event.preventDefault();
-        void start();
+        void submit();
       }}
     >
       <Card flush title="Catalogue">
@@ -131,7 +120,7 @@ export function StartRuleSetForm({
         {preset && <Citations preset={preset} />}
         <Card title="Start it">
           <div className="grid gap-4 sm:max-w-120">
-            <Field label="Name in your league" required error={failure?.fields['name']}>
+            <Field label="Name in your league" required error={fields['name']}>
               {(wiring) => (
                 <TextInput
                   {...wiring}
@@ -142,7 +131,7 @@ export function StartRuleSetForm({
               )}
             </Field>
             {!preset && (
-              <Field label="Sport" required error={failure?.fields['sport']}>
+              <Field label="Sport" required error={fields['sport']}>
                 {(wiring) => (
                   <TextInput
                     {...wiring}

@@ -11,6 +11,3 @@ export function describePlace(held: {
     return held.teams.length === 0 ? 'No team' : joinWords(held.teams.map((team) => team.name));
   return 'The whole league';
 }
-
-/** A role at the start of a line. */
-export const titleOfRole = (role: string): string => role.charAt(0).toUpperCase() + role.slice(1);

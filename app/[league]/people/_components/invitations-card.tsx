@@ -11,7 +11,8 @@ import { Table, Tbody, Td, Th, Thead, Tr } from '@/components/ui/table';
 import { StatusTag } from '@/components/ui/tag';
 import { useToast } from '@/components/ui/toast';
 import type { LeagueAction } from '@/lib/web/action-result';
-import { describePlace, titleOfRole } from './describe-place';
+import { capitalise } from '@/lib/domain/text/sentence';
+import { describePlace } from './describe-place';
 
 type Row = {
   id: string;
@@ -79,7 +80,7 @@ export function InvitationsCard({
               <Td rowHead className="font-[560] break-all">
                 {row.email}
               </Td>
-              <Td label="Role">{titleOfRole(row.role)}</Td>
+              <Td label="Role">{capitalise(row.role)}</Td>
               <Td label="For">{describePlace(row)}</Td>
               <Td label="Invited by">{row.invitedBy}</Td>
               <Td label="Open">

@@ -12,8 +12,9 @@ import { Menu } from '@/components/ui/menu';
 import { useToast } from '@/components/ui/toast';
 import { roles, type Role } from '@/lib/domain/access/permissions';
 import type { LeagueAction } from '@/lib/web/action-result';
+import { capitalise } from '@/lib/domain/text/sentence';
 import { ChangeTeamsDialog, type ChangeTeams } from './change-teams-dialog';
-import { describePlace, titleOfRole } from './describe-place';
+import { describePlace } from './describe-place';
 import type { TeamChoice } from './team-picker';
 
 type Member = {
@@ -45,7 +46,7 @@ const columns: DataColumn<Member>[] = [
   {
     id: 'role',
     header: 'Role',
-    cell: (row) => titleOfRole(row.role),
+    cell: (row) => capitalise(row.role),
     sortValue: (row) => roles.indexOf(row.role),
     searchText: (row) => row.role,
   },
@@ -81,7 +82,7 @@ export function MembersCard({
     { id: 'all' as const, label: 'All', count: members.length },
     ...roles.map((id) => ({
       id,
-      label: `${titleOfRole(id)}s`,
+      label: `${capitalise(id)}s`,
       count: members.filter((member) => member.role === id).length,
     })),
   ];

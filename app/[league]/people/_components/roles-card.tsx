@@ -2,7 +2,7 @@ import { Card } from '@/components/ui/card';
 import { Icon } from '@/components/ui/icon';
 import { Table, Tbody, Td, Th, Thead, Tr } from '@/components/ui/table';
 import { permissionTable, roles, type Reach, type Role } from '@/lib/domain/access/permissions';
-import { titleOfRole } from './describe-place';
+import { capitalise } from '@/lib/domain/text/sentence';
 
 const says: Record<Reach, string> = {
   league: 'Yes',
@@ -24,7 +24,7 @@ export function RolesCard() {
           <Th>What</Th>
           {roles.map((role) => (
             <Th key={role} className="max-sm:hidden">
-              {titleOfRole(role)}
+              {capitalise(role)}
             </Th>
           ))}
           <Th className="sm:hidden">Who</Th>
@@ -53,7 +53,7 @@ function listHolders(reach: Record<Role, Reach>): string {
     .filter((role) => reach[role] !== 'none')
     .map((role) => (reach[role] === 'league' ? role : `${role} (${says[reach[role]].toLowerCase()})`))
     .join(', ');
-  return titleOfRole(line);
+  return capitalise(line);
 }
 
 function ReachMark({ reach }: { reach: Reach }) {

@@ -91,6 +91,7 @@ export function SeasonForm({
     showToast({ tone: 'set', title: season ? 'The season is saved' : `${values.name} is open` });
     if (!season) router.push(paths.dates(league, slug));
     router.refresh();
+    return season ? undefined : 'leaving';
   });
   const freezeOn = values.freezesAt.slice(0, 10);
   const { freezeOn: freezesAt, ...faults } = listSeasonFaults({ ...values, freezeOn });

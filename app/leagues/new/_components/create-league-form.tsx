@@ -44,9 +44,10 @@ export function CreateLeagueForm({
   const [draft, setDraft] = useState<Draft>(() => startDraft(days, kits));
   const [step, setStep] = useState<Step>('league');
   const title = useRef<HTMLHeadingElement>(null);
-  const { submit, pending, failure, fields } = useSubmit(create, ({ league, season }) =>
-    window.location.assign(paths.readiness(league, season)),
-  );
+  const { submit, pending, failure, fields } = useSubmit(create, ({ league, season }) => {
+    window.location.assign(paths.readiness(league, season));
+    return 'leaving';
+  });
   // Until somebody writes another one, the zone of their own clock.
   const shown = { ...draft, league: { ...draft.league, timeZone: draft.league.timeZone || ownZone } };
   const [orderFaults, setOrderFaults] = useState<Record<string, string>>({});

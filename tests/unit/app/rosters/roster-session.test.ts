@@ -184,6 +184,24 @@ describe('a roster open in a tab', () => {
     expect(storage.length).toBe(0);
   });
 
+  it('puts aside what is still typed after the roster was closed, beside what was put aside before', async () => {
+    const { session, read } = openTab();
+    server.weather = 'locked';
+    session.edit([set(1, '4', '5')]);
+    await vi.advanceTimersByTimeAsync(1_000);
+    server.state = 'submitted';
+    session.receivePage(server.page(), false);
+    session.edit([set(2, '14', '15')]);
+    expect(read()).toMatchObject({ unsaved: 0, leftovers: { count: 2 } });
+    expect(numbers(read().view)).toEqual(['4', '14']);
+    server.weather = 'fine';
+    server.state = 'open';
+    session.receivePage(server.page(), true);
+    await vi.advanceTimersByTimeAsync(1_000);
+    expect(numbers(server.players)).toEqual(['5', '15']);
+    expect(storage.length).toBe(0);
+  });
+
   it('puts back what a closed tab left behind, and says so', async () => {
     const first = openTab();
     server.weather = 'offline';

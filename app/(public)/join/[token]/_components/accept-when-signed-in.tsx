@@ -22,7 +22,10 @@ export function AcceptWhenSignedIn({
   onward: string;
   here: string;
 }) {
-  const { submit, pending, failure } = useSubmit(accept, () => window.location.assign(onward));
+  const { submit, pending, failure } = useSubmit(accept, () => {
+    window.location.assign(onward);
+    return 'leaving';
+  });
   if (invited !== signedInAs) {
     return (
       <div className="grid gap-4">

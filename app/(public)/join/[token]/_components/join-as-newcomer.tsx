@@ -30,6 +30,7 @@ export function JoinAsNewcomer({
   const { submit, pending, failure, fields } = useSubmit(join, async () => {
     await enter(email, password.current);
     window.location.assign(onward);
+    return 'leaving' as const;
   });
 
   const send = (event: FormEvent<HTMLFormElement>) => {

@@ -26,7 +26,10 @@ export function SignInToJoin({
 }) {
   const [entering, setEntering] = useState(false);
   const [wrong, setWrong] = useState<string | null>(null);
-  const { submit, pending, failure } = useSubmit(accept, () => window.location.assign(onward));
+  const { submit, pending, failure } = useSubmit(accept, () => {
+    window.location.assign(onward);
+    return 'leaving';
+  });
 
   const send = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();

@@ -2,10 +2,12 @@
 
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
+import { useSubmit } from '@/app/_components/use-submit';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { Checkbox } from '@/components/ui/checkbox';
 import { EmptyState } from '@/components/ui/empty-state';
+import { foldForSearch, holdsEveryWord } from '@/components/ui/fold-for-search';
 import { Field } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
 import { SearchInput } from '@/components/ui/search-input';
@@ -40,13 +42,10 @@ export function BatchForm({ league, season, options, start, held, onHold, onChan
   const showToast = useToast();
   const [values, setValues] = useState(start);
   const [find, setFind] = useState('');
-  const [pending, setPending] = useState(false);
-  const [failure, setFailure] = useState<{ message: string; fields: Record<string, string> }>();
 
   const chosen = new Set(values.teamIds);
-  const wanted = find.trim().toLocaleLowerCase();
   const shown = options.teams.filter((team) =>
-    `${team.name} ${team.division}`.toLocaleLowerCase().includes(wanted),
+    holdsEveryWord(foldForSearch(`${team.name} ${team.division}`), find),
   );
   const divisions = [...new Set(shown.map((team) => team.division))];
   const players = options.teams.reduce((sum, team) => sum + (chosen.has(team.id) ? team.players : 0), 0);
@@ -59,35 +58,18 @@ export function BatchForm({ league, season, options, start, held, onHold, onChan
     setValues({ ...values, teamIds: [...next] });
   };
 
-  const save = async () => {
-    setPending(true);
-    setFailure(undefined);
-    const picked = {
-      teamIds: values.teamIds,
-      shopId: values.shopId,
-      promisedOn: values.promisedOn === '' ? null : values.promisedOn,
-    };
-    try {
-      const answer = held
-        ? await onChange?.(league, { ...picked, ...held })
-        : await onHold?.(league, { ...picked, season });
-      if (answer?.ok) {
-        showToast({
-          tone: 'set',
-          title: `Batch ${answer.data.code} holds ${countOf(values.teamIds.length, 'team')}`,
-        });
-        router.push(paths.batch(league, season, answer.data.code));
-        return;
-      }
-      if (answer) setFailure(answer.error);
-    } catch {
-      setFailure({
-        message: 'That did not reach the server. Your choices are still here; try again.',
-        fields: {},
-      });
-    }
-    setPending(false);
+  const send = async (): Answer => {
+    const { promisedOn, ...rest } = values;
+    const picked = { ...rest, promisedOn: promisedOn === '' ? null : promisedOn };
+    if (held && onChange) return onChange(league, { ...picked, ...held });
+    if (onHold) return onHold(league, { ...picked, season });
+    throw new Error('nothing to send the batch to');
   };
+  const { submit, pending, failure, fields } = useSubmit(send, ({ code }) => {
+    showToast({ tone: 'set', title: `Batch ${code} holds ${countOf(values.teamIds.length, 'team')}` });
+    router.push(paths.batch(league, season, code));
+    return 'leaving';
+  });
 
   if (options.teams.length === 0) {
     return (
@@ -111,7 +93,7 @@ export function BatchForm({ league, season, options, start, held, onHold, onChan
       className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_20rem]"
       onSubmit={(event) => {
         event.preventDefault();
-        void save();
+        void submit();
       }}
     >
       <Card flush title="Teams" aside={`${chosen.size} of ${options.teams.length} picked`}>
@@ -172,7 +154,7 @@ export function BatchForm({ league, season, options, start, held, onHold, onChan
 
       <Card title="For the shop" className="lg:sticky lg:top-5">
         <div className="grid gap-4">
-          <Field label="Shop" required error={failure?.fields['shopId']}>
+          <Field label="Shop" required error={fields['shopId']}>
             {(wiring) => (
               <Select
                 {...wiring}
@@ -191,7 +173,7 @@ export function BatchForm({ league, season, options, start, held, onHold, onChan
           <Field
             label="Promised for"
             required={false}
-            error={failure?.fields['promisedOn']}
+            error={fields['promisedOn']}
             hint={`Hand-out day is ${formatDay(options.season.handOutOn)}.`}
           >
             {(wiring) => (

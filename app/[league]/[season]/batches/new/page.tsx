@@ -10,19 +10,12 @@ import { holdBatchAction } from '../actions';
 
 export const metadata: Metadata = { title: 'Make a batch' };
 
-type Props = {
-  params: Promise<{ league: string; season: string }>;
-  searchParams: Promise<{ teams?: string }>;
-};
+type Props = { params: Promise<{ league: string; season: string }> };
 
-export default async function NewBatchPage({ params, searchParams }: Props) {
+export default async function NewBatchPage({ params }: Props) {
   const { league, season } = await params;
   const { ctx } = await requireLeague(league, paths.newBatch(league, season));
   const options = await showNotFound(getBatchOptions(ctx, { season, batchId: null }));
-  const asked = (await searchParams).teams?.split(',');
-  const chosen = options.teams
-    .filter((team) => asked === undefined || asked.includes(team.id))
-    .map((team) => team.id);
   return (
     <>
       <PageHeader
@@ -35,7 +28,7 @@ export default async function NewBatchPage({ params, searchParams }: Props) {
         season={season}
         options={options}
         start={{
-          teamIds: chosen,
+          teamIds: options.teams.map((team) => team.id),
           shopId: options.shops.length === 1 ? (options.shops[0]?.id ?? '') : '',
           promisedOn: '',
         }}

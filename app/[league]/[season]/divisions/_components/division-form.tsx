@@ -108,6 +108,7 @@ export function DivisionForm({
     showToast({ tone: 'set', title: `${values.name} is ${division ? 'saved' : 'added'}` });
     router.push(list);
     router.refresh();
+    return 'leaving';
   });
   const bind = (name: Exclude<keyof DivisionValues, 'garments'>) => ({
     name,
@@ -184,7 +185,7 @@ export function DivisionForm({
       <GarmentsEditor
         garments={values.garments}
         errors={errors}
-        onChange={(garments) => setValues({ ...values, garments })}
+        onChange={(garments) => setValues((now) => ({ ...now, garments }))}
       />
       <FormFailure failure={failure} />
       <div className="flex flex-wrap gap-2">

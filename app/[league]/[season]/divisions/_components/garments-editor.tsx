@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { useWritten } from '@/app/_components/use-written';
 import { Button } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { Checkbox } from '@/components/ui/checkbox';
@@ -177,20 +177,16 @@ function SizesField({
   error: string | undefined;
   onChange: (sizes: Garment['sizes']) => void;
 }) {
-  const [typed, setTyped] = useState(writeSizes(sizes));
-  const same = JSON.stringify(readSizes(typed)) === JSON.stringify(sizes);
+  const written = useWritten(sizes, { read: readSizes, write: writeSizes }, onChange);
   return (
     <TextareaField
       rows={2}
       label="Sizes, smallest first"
       required
-      value={same ? typed : writeSizes(sizes)}
+      value={written.value}
       error={error}
       hint={`${countOf(sizes.length, 'size')}. Codes with commas; words behind an equals sign: YS = Youth small, YM = Youth medium.`}
-      onChange={(event) => {
-        setTyped(event.target.value);
-        onChange(readSizes(event.target.value));
-      }}
+      onChange={(event) => written.type(event.target.value)}
     />
   );
 }

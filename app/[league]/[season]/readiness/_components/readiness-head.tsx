@@ -1,9 +1,8 @@
 'use client';
 
 import { useRouter } from 'next/navigation';
-import { Button, ButtonLink } from '@/components/ui/button';
+import { Button, ButtonLink, DownloadLink } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/confirm-dialog';
-import { Icon } from '@/components/ui/icon';
 import { PageHeader } from '@/components/ui/page-header';
 import { useToast } from '@/components/ui/toast';
 import { countOf } from '@/lib/domain/text/count-of';
@@ -66,14 +65,9 @@ export function ReadinessHead({
       actions={
         <>
           {teams.length > 0 && (
-            <a
-              href={paths.api.readinessCsv(league, season)}
-              download
-              className="touch rounded-control text-damson hover:bg-linen inline-flex items-center justify-center gap-2 px-3.5 font-[600] no-underline print:hidden"
-            >
-              <Icon name="download" />
+            <DownloadLink look="quiet" icon="download" href={paths.api.readinessCsv(league, season)}>
               CSV
-            </a>
+            </DownloadLink>
           )}
           {may.remind && managers > 0 && (
             <ConfirmDialog
@@ -95,14 +89,7 @@ export function ReadinessHead({
             </ConfirmDialog>
           )}
           {may.batch && (
-            <ButtonLink
-              look="primary"
-              href={
-                ready.length > 0
-                  ? `${paths.newBatch(league, season)}?teams=${ready.map((team) => team.id).join(',')}`
-                  : paths.newBatch(league, season)
-              }
-            >
+            <ButtonLink look="primary" href={paths.newBatch(league, season)}>
               {ready.length > 0 ? `Make a batch of ${countOf(ready.length, 'team')}` : 'Make a batch'}
             </ButtonLink>
           )}

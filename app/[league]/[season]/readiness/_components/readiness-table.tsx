@@ -65,24 +65,20 @@ export function ReadinessTable({
           />
         }
         empty={
-          chip === 'all' ? (
-            <EmptyState
-              title={mayAddTeams ? 'No teams yet' : 'No team of yours in this season'}
-              action={
-                mayAddTeams && (
-                  <ButtonLink look="primary" href={paths.teams(league, season)}>
-                    Add teams
-                  </ButtonLink>
-                )
-              }
-            >
-              {mayAddTeams
-                ? 'Add them one by one, or import a list.'
-                : 'Ask a league admin to name you for your team.'}
-            </EmptyState>
-          ) : (
-            <EmptyState title="No team stands here now">Choose another filter.</EmptyState>
-          )
+          <EmptyState
+            title={mayAddTeams ? 'No teams yet' : 'No team of yours in this season'}
+            action={
+              mayAddTeams && (
+                <ButtonLink look="primary" href={paths.teams(league, season)}>
+                  Add teams
+                </ButtonLink>
+              )
+            }
+          >
+            {mayAddTeams
+              ? 'Add them one by one, or import a list.'
+              : 'Ask a league admin to name you for your team.'}
+          </EmptyState>
         }
       />
     </Card>

@@ -10,6 +10,7 @@ import { DataTable, type DataColumn } from '@/components/ui/data-table';
 import { EmptyState } from '@/components/ui/empty-state';
 import { FilterChips } from '@/components/ui/filter-chips';
 import { rosterStates, type RosterState } from '@/lib/domain/roster/roster-state';
+import { capitalise } from '@/lib/domain/text/sentence';
 import type { ReadyTeam } from '@/lib/use-cases/readiness/list-readiness';
 import { paths } from '@/lib/web/paths';
 import { makeTeamColumns } from '../../_components/team-columns';
@@ -90,7 +91,7 @@ export function RostersTable({
               ...rosterStates
                 .map((state) => ({
                   id: state as Chip,
-                  label: state.charAt(0).toUpperCase() + state.slice(1),
+                  label: capitalise(state),
                   count: teams.filter((team) => team.state === state).length,
                 }))
                 .filter((entry) => entry.count > 0 || entry.id === chip),

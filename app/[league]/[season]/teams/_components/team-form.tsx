@@ -64,6 +64,7 @@ export function TeamForm({
     showToast({ tone: 'set', title: `${values.name} is ${team ? 'saved' : 'added'}` });
     router.push(paths.teams(league, season));
     router.refresh();
+    return 'leaving';
   });
   const errorsOf = (kit: 'home' | 'away') =>
     Object.fromEntries(

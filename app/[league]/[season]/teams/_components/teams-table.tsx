@@ -41,7 +41,10 @@ export function TeamsTable({
     () => teams.filter((team) => division === 'all' || team.divisionId === division),
     [teams, division],
   );
-  const columns = useMemo(() => makeColumns(league, season, leadsTo), [league, season, leadsTo]);
+  const columns = useMemo(
+    () => makeColumns(league, season, leadsTo, list.mayOpenRosters),
+    [league, season, leadsTo, list.mayOpenRosters],
+  );
 
   const remove = async () => {
     if (!going) return;
@@ -165,6 +168,7 @@ function makeColumns(
   league: string,
   season: string,
   leadsTo: 'team' | 'roster' | null,
+  mayOpenRosters: boolean,
 ): DataColumn<ListedTeam>[] {
   return [
     {
@@ -228,15 +232,18 @@ function makeColumns(
     {
       id: 'roster',
       header: 'Roster',
-      cell: (team) => (
-        <TextLink
-          href={paths.roster(league, season, team.slug)}
-          className="no-underline!"
-          aria-label={`Roster of ${team.name}, ${team.state}`}
-        >
+      cell: (team) =>
+        mayOpenRosters ? (
+          <TextLink
+            href={paths.roster(league, season, team.slug)}
+            className="no-underline!"
+            aria-label={`Roster of ${team.name}, ${team.state}`}
+          >
+            <RosterStateTag state={team.state} />
+          </TextLink>
+        ) : (
           <RosterStateTag state={team.state} />
-        </TextLink>
-      ),
+        ),
       sortValue: (team) => team.state,
       searchText: (team) => team.state,
     },

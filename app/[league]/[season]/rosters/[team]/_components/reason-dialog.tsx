@@ -45,17 +45,24 @@ export function ReasonDialog({
     } else setFailure(problem);
   };
 
+  const close = () => {
+    if (pending) return;
+    setFailure(undefined);
+    onOpenChange(false);
+  };
+
   return (
     <Dialog
       open={open}
       onOpenChange={(next) => {
-        if (!pending) onOpenChange(next);
+        if (next) onOpenChange(true);
+        else close();
       }}
       title={title}
       description={children}
       footer={
         <>
-          <Button onClick={() => onOpenChange(false)}>Not now</Button>
+          <Button onClick={close}>Not now</Button>
           <Button look="primary" pending={pending} onClick={() => void run()}>
             {confirm}
           </Button>

@@ -128,6 +128,12 @@ export function RosterEditor({
   const paste = (anchor: { row: number; column: number }, block: string[][]) => {
     const plan = planPaste({ players: view, shown, columns, anchor, block, newId: makeId });
     session.edit(plan.edits);
+    const step = session.getSnapshot().document.done.at(-1);
+    const takeBack = () => {
+      // While the paste is the latest step it can be done again; later it is taken back like any other edit.
+      if (session.getSnapshot().document.done.at(-1) === step) void turn(true);
+      else session.edit(plan.edits.toReversed().map(invertEdit));
+    };
     const [first] = plan.edits;
     if (first !== undefined) setPlace({ row: playerOfEdit(first), column: anchor.column });
     const added = plan.edits.filter(({ kind }) => kind === 'add').length;
@@ -137,7 +143,7 @@ export function RosterEditor({
       tone: plan.problems.length > 0 ? 'care' : 'set',
       title: done.length > 0 ? `Pasted ${done.join(' and ')}` : 'Nothing to paste here',
       body: plan.problems.slice(0, 3).join(' ') || undefined,
-      action: plan.edits.length > 0 ? { label: 'Undo', onSelect: () => void turn(true) } : undefined,
+      action: plan.edits.length > 0 ? { label: 'Undo', onSelect: takeBack } : undefined,
     });
   };
   const remove = (player: RosterEntry) => {

@@ -79,15 +79,18 @@ export function RosterGrid({
   empty: ReactNode;
 }) {
   const id = useId();
-  const frame = useRef<HTMLDivElement>(null);
   const table = useRef<HTMLTableElement>(null);
-  const overflows = useOverflow(frame);
+  const { ref: frame, overflows } = useOverflow();
   const [editing, setEditing] = useState<Editing | null>(null);
   const [leaving, setLeaving] = useState(false);
   const wanted = useRef(false);
 
   const rowIds = rows.map(({ player }) => player.id);
-  const extent = { rows: editable ? [...rowIds, newRow] : rowIds, columns: columns.length + 2 };
+  // Who is in the middle of adding a player when the roster is closed keeps the input, and what is in it.
+  const addable = editable || editing?.place.row === newRow;
+  const extent = { rows: addable ? [...rowIds, newRow] : rowIds, columns: columns.length + 2 };
+  // A row may be gone, or filtered out of sight, while one of its cells is open.
+  const opened = editing !== null && extent.rows.includes(editing.place.row) ? editing : null;
   // A player may be gone, and a column too, since the reader was there.
   const current: Place =
     place !== null && extent.rows.includes(place.row)
@@ -101,7 +104,7 @@ export function RosterGrid({
     table.current?.querySelector<HTMLElement>(`[data-row="${at.row}"][data-column="${at.column}"]`);
   // The cell to go to may be drawn only after this change, so the focus follows the drawing.
   useLayoutEffect(() => {
-    if (!wanted.current || editing !== null) return;
+    if (!wanted.current || opened !== null) return;
     wanted.current = false;
     const cell = findCell(current);
     cell?.focus();
@@ -114,7 +117,7 @@ export function RosterGrid({
     onPlace(to.row === newRow ? { ...to, column: Math.min(to.column, columns.length - 1) } : to);
   };
   const begin = (at: Place, start: EditStart) => {
-    if (!editable || at.column >= columns.length || (editing !== null && editing.problem !== null)) return;
+    if (!editable || at.column >= columns.length || (opened !== null && opened.problem !== null)) return;
     onPlace(at);
     setEditing({ place: at, start, problem: null });
   };
@@ -266,7 +269,7 @@ export function RosterGrid({
   const pressCell = (at: Place, event: MouseEvent) => {
     if ((event.target as HTMLElement).closest('button, input, select') !== null) return;
     const kind = 'pointerType' in event.nativeEvent ? String(event.nativeEvent.pointerType) : '';
-    const again = editing === null && place?.row === at.row && place.column === at.column;
+    const again = opened === null && place?.row === at.row && place.column === at.column;
     if (columns[at.column]?.garment) begin(at, 'pressed');
     else if (kind !== 'mouse' || (again && pressedTwice.current)) begin(at, 'opened');
     pressedTwice.current = again || kind !== 'mouse';
@@ -284,16 +287,16 @@ export function RosterGrid({
 
   const inputFor = (at: Place, player: RosterEntry) => {
     const column = columns[at.column];
-    if (column === undefined || editing === null) return null;
+    if (column === undefined || opened === null) return null;
     return (
       <CellInput
         column={column}
         player={player}
-        start={editing.start}
-        problem={editing.problem}
+        start={opened.start}
+        problem={opened.problem}
         label={`${column.header}${player.name === '' ? '' : `, ${player.name}`}`}
         onDraft={(text) => {
-          if (editing.problem !== null) setEditing({ ...editing, problem: null });
+          if (opened.problem !== null) setEditing({ ...opened, problem: null });
           if (at.row !== newRow) onDraft({ row: at.row, field: column.field, text: readValue(column, text) });
         }}
         onCommit={(text, move) => commit(at, text, move)}
@@ -306,9 +309,7 @@ export function RosterGrid({
     );
   };
   const editorIn = (row: string, player: RosterEntry) =>
-    editing?.place.row === row
-      ? { column: editing.place.column, input: inputFor(editing.place, player) }
-      : null;
+    opened?.place.row === row ? { column: opened.place.column, input: inputFor(opened.place, player) } : null;
 
   return (
     <div ref={frame} className={overflows ? 'relative sm:overflow-x-auto' : 'sm:overflow-x-clip'}>
@@ -318,7 +319,7 @@ export function RosterGrid({
         aria-label={label}
         aria-describedby={`${id}-help`}
         aria-readonly={!editable}
-        aria-rowcount={rows.length + 1 + (editable ? 1 : 0)}
+        aria-rowcount={rows.length + 1 + (addable ? 1 : 0)}
         aria-colcount={extent.columns}
         onKeyDown={press}
         onFocus={() => setLeaving(false)}
@@ -362,7 +363,7 @@ export function RosterGrid({
               </td>
             </tr>
           )}
-          {editable && (
+          {addable && (
             <tr
               role="row"
               aria-rowindex={rows.length + 2}
@@ -370,7 +371,7 @@ export function RosterGrid({
             >
               {columns.map((column, at) => {
                 const here = { row: newRow, column: at };
-                const open = editing?.place.row === newRow && editing.place.column === at;
+                const open = opened?.place.row === newRow && opened.place.column === at;
                 return (
                   <td
                     key={column.field}

@@ -73,7 +73,7 @@ export function RosterHead({
 
   /** Saves what waits, takes the step, and answers what went wrong. */
   const take = async <I,>(step: RosterStep, run: Step<StepInput & I>, more: I, done: string) => {
-    if (pending !== null) return undefined;
+    if (pending !== null) return 'Another step is still on its way. Wait a moment, then try again.';
     setPending(step);
     try {
       const revision = await prepare();
@@ -128,7 +128,7 @@ export function RosterHead({
             team.name
           ) : (
             <span className="inline-flex flex-wrap items-center gap-x-3 gap-y-1">
-              {team.name}
+              <span className="min-w-0 break-words">{team.name}</span>
               <RosterStateTag state={state} />
             </span>
           )

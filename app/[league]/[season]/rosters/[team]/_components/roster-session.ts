@@ -192,7 +192,9 @@ export class RosterSession {
   }
 
   private change(document: RosterDocument): void {
-    if (!this.editable || document === this.snapshot.document) return;
+    if (document === this.snapshot.document) return;
+    // Somebody closed the roster while this was being typed.
+    if (!this.editable) return this.putAside(document);
     this.publish({ document });
     if (this.snapshot.unsaved > 0) this.plan(restMs);
   }
@@ -302,9 +304,10 @@ export class RosterSession {
     clearTimeout(this.timer);
     const work = toWork(document, this.props.now());
     const count = work.sending.length + work.waiting.length;
-    if (count > 0) this.aside = work;
+    if (count > 0) this.aside = joinWork(this.aside, work);
     const bare = { ...document, sending: [], waiting: [], conflicts: [], done: [], undone: [] };
-    const leftovers = count > 0 ? { count, at: work.at } : this.snapshot.leftovers;
+    const { leftovers: before } = this.snapshot;
+    const leftovers = count > 0 ? { count: count + (before?.count ?? 0), at: work.at } : before;
     this.publish({ document: bare, leftovers, save: { is: 'saved', at: work.at } });
   }
 

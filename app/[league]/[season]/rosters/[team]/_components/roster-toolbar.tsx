@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { useRef, type ReactNode } from 'react';
 import { severityTone } from '@/components/status/finding-mark';
 import { IconButton } from '@/components/ui/icon-button';
 import { joinClasses } from '@/components/ui/join-classes';
@@ -42,6 +42,7 @@ export function RosterToolbar({
         ['note', summary.notes],
       ]
     : [];
+  const opener = useRef<HTMLButtonElement>(null);
   const shown = counts.filter(([severity, count]) => count > 0 || only === severity);
   return (
     <div className="print:hidden">
@@ -88,6 +89,7 @@ export function RosterToolbar({
             </>
           )}
           <IconButton
+            ref={opener}
             icon="search"
             label="Find a player"
             aria-expanded={findOpen}
@@ -104,7 +106,9 @@ export function RosterToolbar({
             value={find}
             onChange={(event) => onFind(event.target.value)}
             onKeyDown={(event) => {
-              if (event.key === 'Escape') onFindOpen(false);
+              if (event.key !== 'Escape') return;
+              onFindOpen(false);
+              opener.current?.focus();
             }}
             className="sm:w-72"
           />

@@ -5,6 +5,7 @@ import { severityTone } from '@/components/status/finding-mark';
 import { nameOfCell } from '@/lib/domain/roster/edit';
 import type { ChangeMark } from '@/lib/domain/roster/document';
 import type { Finding } from '@/lib/domain/rules/finding';
+import { capitalise, joinWords } from '@/lib/domain/text/sentence';
 import { leadOfSuggestions } from './cell-findings';
 
 /**
@@ -76,7 +77,7 @@ export function TodoCell({
       ))}
       {marks.length > 0 && (
         <p className="text-damson">
-          {capitalise(listWords(marks.map(({ field }) => nameOfCell(field))))} changed
+          {capitalise(joinWords([...new Set(marks.map(({ field }) => nameOfCell(field)))]))} changed
           {marks[0]?.by != null && ` by ${marks[0].by}`} just now.
         </p>
       )}
@@ -100,9 +101,3 @@ function walkButtons(event: KeyboardEvent<HTMLDivElement>) {
   event.preventDefault();
   event.stopPropagation();
 }
-
-const listWords = (words: readonly string[]): string => {
-  const unique = [...new Set(words)];
-  return unique.length < 2 ? (unique[0] ?? '') : `${unique.slice(0, -1).join(', ')} and ${unique.at(-1)}`;
-};
-const capitalise = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

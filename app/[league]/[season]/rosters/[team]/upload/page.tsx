@@ -8,6 +8,7 @@ import { YokeTile } from '@/components/yoke-tile/yoke-tile';
 import { isRosterEditable } from '@/lib/domain/roster/roster-state';
 import { getRoster } from '@/lib/use-cases/rosters/get-roster';
 import { listMappings } from '@/lib/use-cases/rosters/list-mappings';
+import { countOf } from '@/lib/domain/text/count-of';
 import { paths } from '@/lib/web/paths';
 import { requireLeague } from '@/lib/web/session';
 import { showNotFound } from '@/lib/web/show-not-found';
@@ -28,7 +29,7 @@ export default async function UploadPage({ params }: Props) {
     <>
       <PageHeader
         title="Add players from a file"
-        subtitle={`${roster.team.name}, ${roster.division.name}: ${roster.players.length} players now.`}
+        subtitle={`${roster.team.name}, ${roster.division.name}: ${countOf(roster.players.length, 'player')} now.`}
         picture={<YokeTile kit={roster.team.kits.home} number="12" size="lg" />}
         back={<BackLink href={back}>Roster of {roster.team.name}</BackLink>}
       />

@@ -19,6 +19,7 @@ import { countOf } from '@/lib/domain/text/count-of';
 import type { LeagueAction } from '@/lib/web/action-result';
 import { paths } from '@/lib/web/paths';
 import { ListSource } from '../../../_components/list-source';
+import { useListSource } from '../../../_components/use-list-source';
 import { planTeams } from './plan-teams';
 import { TeamPlanTable } from './team-plan-table';
 
@@ -64,42 +65,32 @@ export function ImportTeams({
 }) {
   const router = useRouter();
   const showToast = useToast();
-  const [file, setFile] = useState<File | null>(null);
-  const [text, setText] = useState('');
   const [sheets, setSheets] = useState<Sheet[]>([]);
   const [sheet, setSheet] = useState(0);
   const [mapping, setMapping] = useState<TeamMapping | null>(null);
-  const [refusal, setRefusal] = useState<string>();
-  const [reading, setReading] = useState(false);
 
-  const take = (found: Sheet[]) => {
-    setSheets(found);
-    setSheet(0);
-    setMapping(guessTeamMapping(found[0]?.rows ?? []));
-    setRefusal(undefined);
-  };
-  const readPaste = () => {
-    const parsed = parseTable(text);
-    if (!parsed.ok) return setRefusal(parsed.message);
-    const { rows: cells, notes, problems } = parsed.table;
-    take([{ name: 'your paste', rows: cells, notes, problems }]);
-  };
-  const readFile = async (picked: File | null) => {
-    setFile(picked);
-    if (!picked) return;
-    setReading(true);
-    const form = new FormData();
-    form.set('file', picked);
-    try {
-      const answer = await onRead(league, form);
-      if (!answer.ok) setRefusal(answer.error.message);
-      else if (!answer.data.ok) setRefusal(answer.data.message);
-      else take(answer.data.tables);
-    } catch {
-      setRefusal('The file did not reach the server. It is still chosen; try again.');
-    }
-    setReading(false);
-  };
+  const { shown } = useListSource<Sheet[]>(
+    {
+      file: async (picked) => {
+        const form = new FormData();
+        form.set('file', picked);
+        const answer = await onRead(league, form);
+        if (!answer.ok) return { ok: false, message: answer.error.message };
+        return answer.data.ok ? { ok: true, list: answer.data.tables } : answer.data;
+      },
+      paste: (text) => {
+        const parsed = parseTable(text);
+        if (!parsed.ok) return parsed;
+        const { rows: cells, notes, problems } = parsed.table;
+        return { ok: true, list: [{ name: 'your paste', rows: cells, notes, problems }] };
+      },
+    },
+    (found) => {
+      setSheets(found ?? []);
+      setSheet(0);
+      setMapping(found && guessTeamMapping(found[0]?.rows ?? []));
+    },
+  );
 
   const rows = sheets[sheet]?.rows;
   const plan = useMemo(() => {
@@ -128,6 +119,7 @@ export function ImportTeams({
       showToast({ tone: 'set', title: `${countOf(added, 'team')} added, ${changed} changed` });
       router.push(paths.teams(league, season));
       router.refresh();
+      return 'leaving';
     },
   );
 
@@ -149,13 +141,7 @@ export function ImportTeams({
         <ListSource
           accepts={['.csv', '.tsv', '.txt', '.xlsx']}
           hint="CSV or XLSX, at most 5 MB."
-          busy={reading}
-          file={file}
-          onFile={(picked) => void readFile(picked)}
-          text={text}
-          onText={setText}
-          onReadPaste={readPaste}
-          refusal={refusal}
+          {...shown}
         />
       </Card>
       {rows && mapping && plan && (
@@ -210,7 +196,7 @@ export function ImportTeams({
             )}
           </Card>
           <TeamPlanTable teams={plan.teams} refused={plan.reading.refused} divisions={divisions} />
-          <FormFailure failure={failure} />
+          <FormFailure failure={failure} inputs={false} />
           <div className="flex flex-wrap items-center gap-4">
             <Button
               look="primary"

@@ -8,10 +8,13 @@ export type Decision = { as: 'new' } | { as: 'player'; id: string };
 /** Lines that may be a player who is there already: the person says which, since a guess could lose one. */
 export function DoubtfulLines({
   lines,
+  decisions,
   onDecide,
 }: {
   lines: readonly AmbiguousLine[];
-  onDecide: (row: number, decision: Decision) => void;
+  decisions: ReadonlyMap<number, Decision>;
+  /** With null what was said is taken back. */
+  onDecide: (row: number, decision: Decision | null) => void;
 }) {
   if (lines.length === 0) return null;
   return (
@@ -26,7 +29,7 @@ export function DoubtfulLines({
               <SelectField
                 label={`${line.incoming.line.name || 'A line without a name'}: ${line.reason}`}
                 placeholder="Say who it is"
-                defaultValue=""
+                value={valueOf(decisions.get(line.row))}
                 options={[
                   { value: 'new', label: 'Somebody new' },
                   ...line.candidates.map((player) => ({
@@ -36,8 +39,10 @@ export function DoubtfulLines({
                 ]}
                 onChange={(event) => {
                   const { value } = event.target;
-                  if (value !== '')
-                    onDecide(line.row, value === 'new' ? { as: 'new' } : { as: 'player', id: value });
+                  onDecide(
+                    line.row,
+                    value === '' ? null : value === 'new' ? { as: 'new' } : { as: 'player', id: value },
+                  );
                 }}
               />
             </li>
@@ -47,3 +52,6 @@ export function DoubtfulLines({
     </div>
   );
 }
+
+const valueOf = (decision: Decision | undefined): string =>
+  decision === undefined ? '' : decision.as === 'new' ? 'new' : decision.id;

@@ -215,7 +215,7 @@ function PreviewRow({
           <span>
             {fate === 'new' && <StatusText tone="set">new</StatusText>}
             {fate === 'changed' && <StatusText tone="note">changed</StatusText>}
-            {fate === 'in doubt' && <StatusText tone="care">in doubt: say below who it is</StatusText>}
+            {fate === 'in doubt' && <StatusText tone="care">in doubt: say above who it is</StatusText>}
             {fate === 'as it is' && <StatusText tone="wait">stays as it is</StatusText>}
             <span className="text-dusk sm:hidden">, row {rowNumber}</span>
           </span>

@@ -1,13 +1,13 @@
 'use client';
 
-import { useState } from 'react';
 import { Card } from '@/components/ui/card';
 import { SelectField } from '@/components/ui/field';
 import { encodingChoices, type EncodingLabel } from '@/lib/domain/roster/import/decode-text';
 import type { Delimiter } from '@/lib/domain/roster/import/parse-table';
 import { sampleFiles } from '@/lib/domain/roster/import/samples';
 import { ListSource } from '../../../../_components/list-source';
-import { bringFile, bringPaste, bringText, type Brought, type Source } from './source';
+import { useListSource } from '../../../../_components/use-list-source';
+import { bringFile, bringPaste, bringText, type Source } from './source';
 
 /** Where the list comes from: a file dropped or picked, or cells pasted; and how its letters were read. */
 export function SourceCard({
@@ -17,37 +17,19 @@ export function SourceCard({
 }: {
   readUrl: string;
   source: Source | null;
-  onSource: (source: Source) => void;
+  onSource: (source: Source | null) => void;
 }) {
-  const [file, setFile] = useState<File | null>(null);
-  const [text, setText] = useState('');
-  const [refusal, setRefusal] = useState<string>();
-  const [busy, setBusy] = useState(false);
-  const take = (brought: Brought) => {
-    if (brought.ok) onSource(brought.source);
-    setRefusal(brought.ok ? undefined : brought.message);
-  };
-  const pick = async (picked: File | null) => {
-    setFile(picked);
-    setRefusal(undefined);
-    if (!picked) return;
-    setBusy(true);
-    try {
-      take(await bringFile(picked, readUrl));
-    } catch {
-      setRefusal(
-        'The file did not reach the server. It is still chosen: check the connection and pick it again.',
-      );
-    }
-    setBusy(false);
-  };
+  const { shown, takeAnew } = useListSource<Source>(
+    { file: (file) => bringFile(file, readUrl), paste: bringPaste },
+    onSource,
+  );
   /** The same bytes in another encoding, or cut at another separator. */
   const readAnew = (change: { encoding?: EncodingLabel | ''; delimiter?: Delimiter }) => {
     if (!source?.text) return;
     const { bytes, chosen } = source.text;
     const encoding = change.encoding ?? chosen.encoding;
     const delimiter = change.delimiter ?? chosen.delimiter;
-    take(
+    takeAnew(
       bringText(source.from, bytes, {
         ...(encoding && { encoding }),
         ...(delimiter !== undefined && { delimiter }),
@@ -59,13 +41,7 @@ export function SourceCard({
       <ListSource
         accepts={['.csv', '.tsv', '.txt', '.xlsx', '.xls', '.xlsm', '.ods', '.numbers', '.pdf']}
         hint="CSV or XLSX, at most 5 MB and 2,000 rows. Formulas are never worked out."
-        busy={busy}
-        file={file}
-        onFile={(picked) => void pick(picked)}
-        text={text}
-        onText={setText}
-        onReadPaste={() => take(bringPaste(text))}
-        refusal={refusal}
+        {...shown}
       />
       {source?.text && (
         <div className="mt-4 flex flex-wrap items-end gap-4">

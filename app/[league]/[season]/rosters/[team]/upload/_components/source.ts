@@ -1,6 +1,7 @@
 import { decodeText, decodeTextAs, type EncodingLabel } from '@/lib/domain/roster/import/decode-text';
 import { refuseSize } from '@/lib/domain/roster/import/limits';
 import { parseTable, type Delimiter } from '@/lib/domain/roster/import/parse-table';
+import type { Taken } from '../../../../_components/use-list-source';
 
 export type Sheet = { name: string; rows: string[][]; notes: string[] };
 
@@ -20,7 +21,7 @@ export type Source = {
 /** What a person chose where the guess was wrong; empty while the guess stands. */
 export type TextChoice = { encoding?: EncodingLabel; delimiter?: Delimiter };
 
-export type Brought = { ok: true; source: Source } | { ok: false; message: string };
+type Brought = Taken<Source>;
 
 const noteProblems = (problems: readonly { rowNumber: number; message: string }[]): string[] =>
   problems.map((problem) => `Row ${problem.rowNumber}: ${problem.message}`);
@@ -32,7 +33,7 @@ export function bringPaste(text: string): Brought {
   const { rows, notes, problems } = parsed.table;
   return {
     ok: true,
-    source: {
+    list: {
       from: 'your paste',
       sheets: [{ name: 'paste', rows, notes: [...notes, ...noteProblems(problems)] }],
       text: null,
@@ -53,7 +54,7 @@ export function bringText(name: string, bytes: Uint8Array, chosen: TextChoice): 
   const all = [...(decoded.note === undefined ? [] : [decoded.note]), ...notes, ...noteProblems(problems)];
   return {
     ok: true,
-    source: {
+    list: {
       from: name,
       sheets: [{ name, rows, notes: all }],
       text: {
@@ -90,5 +91,5 @@ export async function bringFile(file: File, readUrl: string): Promise<Brought> {
   const sheets = answer.tables.map((table) => ({ ...table, notes: [...answer.notes, ...table.notes] }));
   return sheets.length === 0
     ? { ok: false, message: `${file.name} has no sheet with a list in it.` }
-    : { ok: true, source: { from: file.name, sheets, text: null } };
+    : { ok: true, list: { from: file.name, sheets, text: null } };
 }

@@ -102,6 +102,12 @@ export function UploadRoster({
     () => (reading ? planMerge(roster.players, reading.lines, decisions) : null),
     [reading, roster.players, decisions],
   );
+  // A line that was decided stays in sight, so that the answer can be changed.
+  const doubts = useMemo(() => {
+    const open = reading ? planMerge(roster.players, reading.lines).ambiguous : [];
+    const rows = new Set(open.map(({ row }) => row));
+    return [...open, ...(plan?.ambiguous ?? []).filter(({ row }) => !rows.has(row))];
+  }, [reading, roster.players, plan]);
   const merged = useMemo(() => {
     let added = 0;
     return reading
@@ -147,12 +153,17 @@ export function UploadRoster({
       });
       router.push(path);
       router.refresh();
+      return 'leaving';
     },
   );
 
   return (
     <div className="grid gap-5">
-      <SourceCard readUrl={readUrl} source={source} onSource={(from) => takeSheet(from, 0)} />
+      <SourceCard
+        readUrl={readUrl}
+        source={source}
+        onSource={(from) => (from === null ? setSource(null) : takeSheet(from, 0))}
+      />
       {source && rows && mapping && reading && plan && merged && (
         <>
           <ColumnsCard
@@ -180,8 +191,14 @@ export function UploadRoster({
                 options={mergeModes.map((value) => ({ value, ...modeWords[value] }))}
               />
               <DoubtfulLines
-                lines={plan.ambiguous}
-                onDecide={(row, decision) => setDecisions(new Map([...decisions, [row, decision]]))}
+                lines={doubts}
+                decisions={decisions}
+                onDecide={(row, decision) => {
+                  const next = new Map(decisions);
+                  if (decision === null) next.delete(row);
+                  else next.set(row, decision);
+                  setDecisions(next);
+                }}
               />
               {removed > 0 && (
                 <div className="mt-3">
@@ -199,7 +216,7 @@ export function UploadRoster({
             garments={roster.garments}
             ruleSet={roster.ruleSet}
           />
-          <FormFailure failure={failure} />
+          <FormFailure failure={failure} inputs={false} />
           <div className="flex flex-wrap items-center gap-4">
             <Button
               look="primary"
