@@ -184,8 +184,8 @@ function HeldTeams({ teams }: { teams: Detail['heldTeams'] }) {
         <ul>
           {teams.map((team) => (
             <li key={team.id} className="border-hem flex justify-between gap-3 border-t px-4 py-2.5">
-              <span className="font-[560]">{team.name}</span>
-              <span className="text-dusk">{team.state}</span>
+              <span className="min-w-0 font-[560] break-words">{team.name}</span>
+              <span className="text-dusk shrink-0">{team.state}</span>
             </li>
           ))}
         </ul>

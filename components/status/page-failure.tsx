@@ -14,18 +14,21 @@ export function PageFailure({
   title?: string;
 }) {
   return (
-    <ErrorState
-      title={title}
-      reference={readDigest(error)}
-      action={
-        <Button look="primary" onClick={() => retry()}>
-          Try again
-        </Button>
-      }
-    >
-      Something failed on our side, not on yours, and nothing that was saved is lost. Try again; if it stays,
-      give the reference to whoever runs this server.
-    </ErrorState>
+    <>
+      <h1 className="sr-only">{title}</h1>
+      <ErrorState
+        title={title}
+        reference={readDigest(error)}
+        action={
+          <Button look="primary" onClick={() => retry()}>
+            Try again
+          </Button>
+        }
+      >
+        Something failed on our side, not on yours, and nothing that was saved is lost. Try again; if it
+        stays, give the reference to whoever runs this server.
+      </ErrorState>
+    </>
   );
 }
 

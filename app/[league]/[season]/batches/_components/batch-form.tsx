@@ -140,8 +140,8 @@ export function BatchForm({ league, season, options, start, held, onHold, onChan
                       label={
                         <span className="flex items-center gap-3">
                           <YokeTile kit={team.kit} size="xs" />
-                          <span className="font-[560]">{team.name}</span>
-                          <span className="text-dusk">{countOf(team.players, 'player')}</span>
+                          <span className="min-w-0 font-[560] break-words">{team.name}</span>
+                          <span className="text-dusk shrink-0">{countOf(team.players, 'player')}</span>
                         </span>
                       }
                     />

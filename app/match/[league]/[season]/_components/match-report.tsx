@@ -91,7 +91,7 @@ function Side({ side, rules }: { side: MatchSide; rules: string | null }) {
       title={
         <span className="flex items-center gap-2">
           <YokeTile kit={side.kits.home} size="xs" />
-          {side.name}
+          <span className="min-w-0 break-words">{side.name}</span>
         </span>
       }
       aside={`${side.players.length} listed, roster ${side.state}`}
