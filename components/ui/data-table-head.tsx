@@ -22,7 +22,7 @@ export function DataTableHead<Row>({
   topless: boolean;
 }) {
   const look = joinClasses(
-    'type-fine text-dusk border-hem bg-card border-b px-3 py-1.5 font-[560] whitespace-nowrap',
+    'type-fine text-dusk border-hem bg-card border-b px-3 py-1.5 font-[560] sm:max-lg:px-2 sm:max-lg:first:pl-3 sm:max-lg:last:pr-3 whitespace-nowrap',
     sticky && 'sticky top-14 z-10 lg:top-0 print:static',
     topless && 'first:rounded-tl-card last:rounded-tr-card',
   );
@@ -76,7 +76,12 @@ function turnSort(sorting: SortingState, id: string): SortingState {
 
 function SortSign({ direction }: { direction: 'asc' | 'desc' | null }) {
   return (
-    <svg aria-hidden="true" viewBox="0 0 8 10" className="h-2.5 w-2 shrink-0 fill-current">
+    <svg
+      aria-hidden="true"
+      viewBox="0 0 8 10"
+      // A tablet has no room for signs that say only what could be done.
+      className={joinClasses('h-2.5 w-2 shrink-0 fill-current', direction === null && 'sm:max-lg:hidden')}
+    >
       <path d="M.5 4L4 .5 7.5 4z" opacity={direction === 'asc' ? 1 : 0.3} />
       <path d="M.5 6L4 9.5 7.5 6z" opacity={direction === 'desc' ? 1 : 0.3} />
     </svg>

@@ -256,7 +256,8 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   );
 }
 
-const cellLook = 'border-hem h-12 border-t [tr:first-child>&]:border-t-0 px-3 py-2 align-middle font-normal';
+const cellLook =
+  'border-hem h-12 border-t [tr:first-child>&]:border-t-0 px-3 sm:max-lg:px-2 sm:max-lg:first:pl-3 sm:max-lg:last:pr-3 py-2 align-middle font-normal';
 
 function DataCell<Row>({ column, row }: { column: DataColumn<Row>; row: Row }) {
   const look = joinClasses(cellLook, column.end === true && 'sm:text-right');

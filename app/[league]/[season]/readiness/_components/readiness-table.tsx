@@ -104,7 +104,9 @@ function makeColumns(league: string, season: string): DataColumn<ReadyTeam>[] {
         team.batch === null ? (
           <Nothing />
         ) : (
-          <StatusText tone={team.batch.state === 'received' ? 'set' : 'wait'}>{team.batch.code}</StatusText>
+          <StatusText tone={team.batch.state === 'received' ? 'set' : 'wait'}>
+            <span className="whitespace-nowrap">{team.batch.code}</span>
+          </StatusText>
         ),
       sortValue: (team) => team.batch?.code ?? null,
       searchText: (team) => team.batch?.code ?? '',
