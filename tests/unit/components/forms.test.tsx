@@ -91,8 +91,12 @@ describe('a list that is brought', () => {
     await act(async () => answers.get('a.csv')?.settle({ ok: false, message: 'No list.' }));
     expect(shown().refusal).toBe('No list.');
     act(() => shown().onFile(null));
-    expect(lists.at(-1)).toBeNull();
     expect(shown()).toMatchObject({ file: null, refusal: undefined, busy: false });
+    act(() => shown().onFile(file('b.csv')));
+    await act(async () => answers.get('b.csv')?.settle({ ok: true, list: 'b' }));
+    expect(lists.at(-1)).toBe('b');
+    act(() => shown().onFile(null));
+    expect(lists.at(-1)).toBeNull();
   });
 
   it('is refused with what to do when the file does not reach the server, and a paste after it counts', async () => {
