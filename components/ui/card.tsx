@@ -2,13 +2,12 @@ import type { ComponentProps, ReactNode } from 'react';
 import { joinClasses } from './join-classes';
 
 /**
- * A white card with a hem. Props: `title` (a section title; `level` 2 unless given), `aside` at the right of it, `flush`
+ * A white card with a hem. Props: `title` (a section title), `aside` at the right of it, `flush`
  * when the content reaches the edges (tables, lists), `id`.
  */
 export function Card({
   title,
   aside,
-  level = 2,
   flush = false,
   className,
   children,
@@ -16,10 +15,8 @@ export function Card({
 }: {
   title?: ReactNode;
   aside?: ReactNode;
-  level?: 2 | 3 | undefined;
   flush?: boolean | undefined;
 } & Omit<ComponentProps<'section'>, 'title'>) {
-  const Heading = level === 2 ? 'h2' : 'h3';
   const headed = title !== undefined || aside !== undefined;
   return (
     <section
@@ -37,7 +34,7 @@ export function Card({
             flush ? 'px-4 pt-4 pb-3' : 'mb-3',
           )}
         >
-          {title !== undefined && <Heading className="type-section">{title}</Heading>}
+          {title !== undefined && <h2 className="type-section">{title}</h2>}
           {aside !== undefined && <div className="type-small text-dusk">{aside}</div>}
         </div>
       )}

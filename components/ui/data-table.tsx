@@ -20,7 +20,6 @@ import { EmptyState } from './empty-state';
 import { joinClasses } from './join-classes';
 import { SearchInput } from './search-input';
 import { Select } from './select';
-import { Skeleton } from './skeleton';
 import { useOverflow } from './use-overflow';
 import { useWindowRows } from './use-window-rows';
 
@@ -46,7 +45,6 @@ export type DataTableProps<Row> = {
   rowActions?: (row: Row) => ReactNode;
   /** Enter on a row. Offer the same as a link in its first cell. */
   onOpenRow?: (row: Row) => void;
-  loading?: boolean;
 };
 
 const features = tableFeatures({
@@ -57,7 +55,6 @@ const features = tableFeatures({
   sortedRowModel: createSortedRowModel(),
 });
 const collator = new Intl.Collator('en', { numeric: true, sensitivity: 'base' });
-const skeletonRows = [0, 1, 2, 3, 4, 5];
 
 /**
  * A list that can be sorted, searched and walked through: sticky head, arrow keys between rows, actions at the right,
@@ -65,7 +62,7 @@ const skeletonRows = [0, 1, 2, 3, 4, 5];
  * columns hold functions. Props: see DataTableProps.
  */
 export function DataTable<Row extends object>(props: DataTableProps<Row>) {
-  const { caption, rows, columns, getRowId, loading = false } = props;
+  const { caption, rows, columns, getRowId } = props;
   const [search, setSearch] = useState('');
   const [sorting, setSorting] = useState<SortingState>(
     props.initialSort === undefined
@@ -167,7 +164,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     </div>
   );
 
-  if (!loading && rows.length === 0 && props.onClearFilters === undefined) return props.empty;
+  if (rows.length === 0 && props.onClearFilters === undefined) return props.empty;
 
   const span = columns.length + (props.rowActions === undefined ? 0 : 1);
   return (
@@ -180,7 +177,6 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
         <table
           role="table"
           aria-rowcount={windowed.on ? shown.length + 1 : undefined}
-          aria-busy={loading || undefined}
           className={joinClasses(
             'rows-as-cards w-full border-separate border-spacing-0 text-left',
             windowed.on && 'table-fixed',
@@ -196,18 +192,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
             topless={bare}
           />
           <tbody ref={body} role="rowgroup" onKeyDown={walk}>
-            {loading &&
-              skeletonRows.map((at) => (
-                <tr key={at} role="row">
-                  {columns.map((column) => (
-                    <td key={column.id} role="cell" className={cellLook}>
-                      <Skeleton className="h-5 w-3/4 min-w-8" />
-                    </td>
-                  ))}
-                  {props.rowActions !== undefined && <td role="cell" className={cellLook} />}
-                </tr>
-              ))}
-            {!loading && shown.length === 0 && (
+            {shown.length === 0 && (
               <tr role="row">
                 <td role="cell" colSpan={span} className="border-hem border-t">
                   <NoMatch
@@ -218,36 +203,35 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
               </tr>
             )}
             {windowed.before > 0 && <Spacer height={windowed.before} span={span} />}
-            {!loading &&
-              windowed.indexes.map((at) => {
-                const row = shown[at];
-                if (row === undefined) return null;
-                return (
-                  <tr
-                    key={row.id}
-                    ref={windowed.measure}
-                    role="row"
-                    data-index={at}
-                    aria-rowindex={windowed.on ? at + 2 : undefined}
-                    tabIndex={at === reachable ? 0 : -1}
-                    onFocus={() => setActive(at)}
-                    className="hover:bg-cotton focus-visible:-outline-offset-2"
-                  >
-                    {columns.map((column) => (
-                      <DataCell key={column.id} column={column} row={row.original} />
-                    ))}
-                    {props.rowActions !== undefined && (
-                      <td
-                        role="cell"
-                        data-row-actions=""
-                        className={joinClasses(cellLook, 'text-right whitespace-nowrap print:hidden')}
-                      >
-                        {props.rowActions(row.original)}
-                      </td>
-                    )}
-                  </tr>
-                );
-              })}
+            {windowed.indexes.map((at) => {
+              const row = shown[at];
+              if (row === undefined) return null;
+              return (
+                <tr
+                  key={row.id}
+                  ref={windowed.measure}
+                  role="row"
+                  data-index={at}
+                  aria-rowindex={windowed.on ? at + 2 : undefined}
+                  tabIndex={at === reachable ? 0 : -1}
+                  onFocus={() => setActive(at)}
+                  className="hover:bg-cotton focus-visible:-outline-offset-2"
+                >
+                  {columns.map((column) => (
+                    <DataCell key={column.id} column={column} row={row.original} />
+                  ))}
+                  {props.rowActions !== undefined && (
+                    <td
+                      role="cell"
+                      data-row-actions=""
+                      className={joinClasses(cellLook, 'text-right whitespace-nowrap print:hidden')}
+                    >
+                      {props.rowActions(row.original)}
+                    </td>
+                  )}
+                </tr>
+              );
+            })}
             {windowed.after > 0 && <Spacer height={windowed.after} span={span} />}
           </tbody>
         </table>

@@ -20,14 +20,12 @@ export type FieldProps = {
   /** What is wrong and what to do about it. */
   error?: string | undefined;
   required?: boolean | undefined;
-  /** Keeps the label for screen readers only, where a heading already names the control. */
-  labelHidden?: boolean | undefined;
   id?: string | undefined;
   className?: string | undefined;
 };
 
 /**
- * Label, control, hint and error as one. Props: `label`, `hint`, `error`, `required`, `labelHidden`, and as children
+ * Label, control, hint and error as one. Props: `label`, `hint`, `error`, `required`, and as children
  * a function that gets the wiring: `<Field label="Name">{(wiring) => <TextInput {...wiring} name="name" />}</Field>`.
  */
 export function Field({
@@ -35,7 +33,6 @@ export function Field({
   hint,
   error,
   required,
-  labelHidden = false,
   id: givenId,
   className,
   children,
@@ -45,7 +42,7 @@ export function Field({
   const said = [hint !== undefined && `${id}-hint`, error !== undefined && `${id}-error`].filter(Boolean);
   return (
     <div className={joinClasses('grid content-start gap-1.5', className)}>
-      <label htmlFor={id} className={labelHidden ? 'sr-only' : 'type-label'}>
+      <label htmlFor={id} className="type-label">
         {label}
         {required === false && <span className="text-dusk font-[400]"> (if you like)</span>}
       </label>
@@ -83,12 +80,11 @@ export function TextField({
   hint,
   error,
   required,
-  labelHidden,
   id,
   className,
   ...input
 }: Wired<ComponentProps<typeof TextInput>>) {
-  const field = { label, hint, error, required, labelHidden, id, className };
+  const field = { label, hint, error, required, id, className };
   return <Field {...field}>{(wiring) => <TextInput {...input} {...wiring} />}</Field>;
 }
 
@@ -98,12 +94,11 @@ export function TextareaField({
   hint,
   error,
   required,
-  labelHidden,
   id,
   className,
   ...input
 }: Wired<ComponentProps<typeof Textarea>>) {
-  const field = { label, hint, error, required, labelHidden, id, className };
+  const field = { label, hint, error, required, id, className };
   return <Field {...field}>{(wiring) => <Textarea {...input} {...wiring} />}</Field>;
 }
 
@@ -113,12 +108,11 @@ export function SelectField({
   hint,
   error,
   required,
-  labelHidden,
   id,
   className,
   options,
   ...input
 }: Wired<ComponentProps<typeof Select>> & { options: readonly Option[] }) {
-  const field = { label, hint, error, required, labelHidden, id, className };
+  const field = { label, hint, error, required, id, className };
   return <Field {...field}>{(wiring) => <Select {...input} options={options} {...wiring} />}</Field>;
 }

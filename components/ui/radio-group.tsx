@@ -3,13 +3,12 @@ import { tickBox } from './control-looks';
 import { FieldError } from './field';
 import { joinClasses } from './join-classes';
 
-/** One choice of several, all in sight. Props: `legend`, `name`, `options` with hints, `defaultValue` or `value` and `onChange(value)`, `hint`, `error`. */
+/** One choice of several, all in sight. Props: `legend`, `name`, `options` with hints, `value` and `onChange(value)`, `hint`, `error`. */
 export function RadioGroup({
   legend,
   name,
   options,
   value,
-  defaultValue,
   onChange,
   hint,
   error,
@@ -18,15 +17,13 @@ export function RadioGroup({
   legend: ReactNode;
   name: string;
   options: readonly { value: string; label: ReactNode; hint?: ReactNode; disabled?: boolean | undefined }[];
-  value?: string | undefined;
-  defaultValue?: string | undefined;
-  onChange?: ((value: string) => void) | undefined;
+  value: string;
+  onChange: (value: string) => void;
   hint?: ReactNode;
   error?: string | undefined;
   legendHidden?: boolean | undefined;
 }) {
   const id = useId();
-  const chosen = value === undefined ? { defaultValue } : { value };
   return (
     <fieldset aria-describedby={error === undefined ? undefined : `${id}-error`}>
       <legend className={legendHidden ? 'sr-only' : 'type-label'}>{legend}</legend>
@@ -39,11 +36,8 @@ export function RadioGroup({
               name={name}
               value={option.value}
               disabled={option.disabled}
-              {...('value' in chosen
-                ? { checked: chosen.value === option.value }
-                : { defaultChecked: chosen.defaultValue === option.value })}
-              onChange={onChange === undefined ? undefined : () => onChange(option.value)}
-              readOnly={value !== undefined && onChange === undefined}
+              checked={option.value === value}
+              onChange={() => onChange(option.value)}
               className={joinClasses(tickBox, 'rounded-full')}
             />
             <span

@@ -2,17 +2,16 @@ import type { ComponentProps, ReactNode } from 'react';
 import { joinClasses } from './join-classes';
 
 /**
- * Pieces of a static table. `Table` props: `caption` (read aloud; shown with `captionShown`), `cards` turns rows into
+ * Pieces of a static table. `Table` props: `caption` (read aloud), `cards` turns rows into
  * cards on a phone and then every Td needs `label`. For lists that are sorted or searched use DataTable.
  */
 export function Table({
   caption,
-  captionShown = false,
   cards = false,
   className,
   children,
   ...rest
-}: { caption: ReactNode; captionShown?: boolean; cards?: boolean } & ComponentProps<'table'>) {
+}: { caption: ReactNode; cards?: boolean } & ComponentProps<'table'>) {
   return (
     <div className={joinClasses('min-w-0', cards ? 'sm:overflow-x-auto' : 'overflow-x-auto')}>
       <table
@@ -20,7 +19,7 @@ export function Table({
         role="table"
         className={joinClasses('w-full border-collapse text-left', cards && 'rows-as-cards', className)}
       >
-        <caption className={captionShown ? 'type-section px-4 py-3 text-left' : 'sr-only'}>{caption}</caption>
+        <caption className="sr-only">{caption}</caption>
         {children}
       </table>
     </div>

@@ -72,7 +72,7 @@ export function CreateLeagueForm({
 
   return (
     <div className="grid max-w-180 gap-5">
-      <StepList step={step} reached={at} blamed={failure ? blamed : undefined} onGo={go} />
+      <StepList step={step} blamed={failure ? blamed : undefined} onGo={go} />
       <Card>
         <form method="post" onSubmit={(event) => void send(event)} className="grid gap-5">
           <h2 ref={title} tabIndex={-1} className="type-section outline-none">

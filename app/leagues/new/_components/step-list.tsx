@@ -2,18 +2,17 @@ import { joinClasses } from '@/components/ui/join-classes';
 import { StatusMark } from '@/components/ui/status-mark';
 import { steps, stepTitles, type Step } from './draft';
 
-/** The steps in order; those passed can be gone back to. Props: `step` now, `reached`, `blamed` (with a fault), `onGo`. */
+/** The steps in order; those passed can be gone back to. Props: `step` now, `blamed` (with a fault), `onGo`. */
 export function StepList({
   step,
-  reached,
   blamed,
   onGo,
 }: {
   step: Step;
-  reached: number;
   blamed: Step | undefined;
   onGo: (step: Step) => void;
 }) {
+  const reached = steps.indexOf(step);
   return (
     <nav aria-label="Steps">
       <ol className="flex flex-wrap gap-x-1 gap-y-1">
