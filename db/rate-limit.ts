@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import { RateLimiterPostgres, RateLimiterRes } from 'rate-limiter-flexible';
 import { getDatabase } from './client';
 
@@ -23,10 +24,13 @@ function getLimiter(budget: RateBudget): RateLimiterPostgres {
   return limiter;
 }
 
+/** Keys may be addresses of people and of any length: what is kept is a digest that tells neither. */
+const keep = (key: string): string => createHash('sha256').update(key).digest('base64url');
+
 /** Takes one point from the budget for `key`; answers how many seconds to wait when it is spent, else null. */
 export async function takeRatePoint(budget: RateBudget, key: string): Promise<number | null> {
   try {
-    await getLimiter(budget).consume(key);
+    await getLimiter(budget).consume(keep(key));
     return null;
   } catch (reason) {
     if (reason instanceof RateLimiterRes) return Math.max(1, Math.ceil(reason.msBeforeNext / 1000));
@@ -36,12 +40,12 @@ export async function takeRatePoint(budget: RateBudget, key: string): Promise<nu
 
 /** Gives one point back, as for a try that turned out to be right. */
 export async function returnRatePoint(budget: RateBudget, key: string): Promise<void> {
-  await getLimiter(budget).reward(key, 1);
+  await getLimiter(budget).reward(keep(key), 1);
 }
 
 /** Gives `key` its whole budget back, as after a right password. */
 export const clearRateBudget = (budget: RateBudget, key: string): Promise<boolean> =>
-  getLimiter(budget).delete(key);
+  getLimiter(budget).delete(keep(key));
 
 /** Forgets budgets that ran out of time; the worker calls it now and then so that the table stays small. */
 export async function deleteExpiredRates(now: Date): Promise<void> {

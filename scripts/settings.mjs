@@ -28,7 +28,8 @@ function readNumber(name, byDefault, least, most) {
 /** What the environment asks of `npm start` and `npm run dev`. */
 export function readSettings() {
   const port = readNumber('PORT', 3000, 1, 65_535);
-  const demo = process.env.RAGLAN_DEMO ?? '1';
+  // Whoever names an address of their own runs it in earnest: no published passwords there unless asked for.
+  const demo = process.env.RAGLAN_DEMO ?? (isOwnMachine(process.env.RAGLAN_BASE_URL) ? '1' : '0');
   if (demo !== '0' && demo !== '1') {
     throw new Halt(`RAGLAN_DEMO is "${demo}"; it must be 1 (demo leagues, the default of npm start) or 0.`);
   }
@@ -75,4 +76,13 @@ export function makeEnvironments({ urls, port, host, baseUrl, demo, smtpUrl, inb
   Reflect.deleteProperty(web, 'DATABASE_URL');
   Reflect.deleteProperty(web, 'RAGLAN_OWNER_URL');
   return { web, worker: { ...web, RAGLAN_OWNER_URL: urls.ownerUrl } };
+}
+
+/**
+ * Whether an address leads to this machine; none given does.
+ * @param {string | undefined} url
+ */
+function isOwnMachine(url) {
+  if (url === undefined || !URL.canParse(url)) return true;
+  return ['localhost', '127.0.0.1', '[::1]'].includes(new URL(url).hostname);
 }

@@ -2,6 +2,7 @@
 // Next trusts X-Forwarded-For as a client sends it; here it counts only for proxies that the operator has named.
 import { createServer } from 'node:http';
 import next from 'next';
+import { readNetwork } from './network-address.mjs';
 
 const port = Number(process.env.PORT ?? 3000);
 const hostname = process.env.HOST ?? '127.0.0.1';
@@ -40,7 +41,7 @@ function letDownloadsSayTheirSize(response) {
 
 const server = createServer((request, response) => {
   letDownloadsSayTheirSize(response);
-  request.headers['x-raglan-address'] = findAddress(request);
+  request.headers['x-raglan-address'] = readNetwork(findAddress(request));
   delete request.headers['x-request-id'];
   handle(request, response);
 });

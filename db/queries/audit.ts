@@ -1,3 +1,4 @@
+import { sql } from 'kysely';
 import type { AuditEvent, SystemEvent } from '@/lib/domain/audit/event';
 import type { AnyTx, LeagueTx } from '../tenant';
 
@@ -22,6 +23,25 @@ export async function insertAuditEvent(
       request_id: stamp.requestId,
     })
     .execute();
+}
+
+/** Whether the league's history tells of this very event by this person, at `since` or later. */
+export async function hasAuditEventSince(
+  tx: LeagueTx,
+  asked: { event: AuditEvent; userId: string; since: Date },
+): Promise<boolean> {
+  const row = await tx
+    .selectFrom('audit_events')
+    .select('id')
+    .where('league_id', '=', tx.leagueId)
+    .where('subject_id', '=', asked.event.subjectId)
+    .where('type', '=', asked.event.type)
+    .where('user_id', '=', asked.userId)
+    .where('at', '>=', asked.since)
+    .where('data', '@>', sql<never>`${JSON.stringify(asked.event.data)}::jsonb`)
+    .limit(1)
+    .executeTakeFirst();
+  return row !== undefined;
 }
 
 /** Appends one event that belongs to no league, such as a sign-in. */

@@ -94,7 +94,7 @@ export async function lockBatch(tx: LeagueTx, batchId: string): Promise<BatchRow
     .select('id')
     .where('league_id', '=', tx.leagueId)
     .where('id', '=', batchId)
-    .forUpdate()
+    .forNoKeyUpdate()
     .execute();
   return findBatchById(tx, batchId);
 }
@@ -341,7 +341,7 @@ export async function lockRostersOfTeams(tx: LeagueTx, teamIds: readonly string[
     .where('league_id', '=', tx.leagueId)
     .where('team_id', 'in', [...teamIds])
     .orderBy('id')
-    .forUpdate()
+    .forNoKeyUpdate()
     .execute();
 }
 

@@ -29,7 +29,7 @@ export async function lockSeason(tx: LeagueTx, seasonId: string): Promise<boolea
     .select('id')
     .where('league_id', '=', tx.leagueId)
     .where('id', '=', seasonId)
-    .forUpdate()
+    .forNoKeyUpdate()
     .executeTakeFirst();
   return row !== undefined;
 }
@@ -47,7 +47,7 @@ export async function lockSeasonOfDivision(tx: LeagueTx, divisionId: string): Pr
     .select('s.id')
     .where('s.league_id', '=', tx.leagueId)
     .where('d.id', '=', divisionId)
-    .forUpdate('s')
+    .forNoKeyUpdate('s')
     .executeTakeFirst();
   return row?.id;
 }

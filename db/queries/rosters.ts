@@ -115,7 +115,7 @@ export async function lockRoster(tx: LeagueTx, rosterId: string): Promise<Roster
     .select('id')
     .where('league_id', '=', tx.leagueId)
     .where('id', '=', rosterId)
-    .forUpdate()
+    .forNoKeyUpdate()
     .execute();
   return findRoster(tx, rosterId);
 }

@@ -69,7 +69,7 @@ export function lockRuleSet(tx: LeagueTx, ruleSetId: string) {
     .select(['id', 'name', 'preset_id as presetId'])
     .where('league_id', '=', tx.leagueId)
     .where('id', '=', ruleSetId)
-    .forUpdate()
+    .forNoKeyUpdate()
     .executeTakeFirst();
 }
 

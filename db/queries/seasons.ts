@@ -62,7 +62,7 @@ export async function lockCurrentSeason(tx: LeagueTx): Promise<string | null> {
     .selectFrom('leagues')
     .select('current_season_id')
     .where('id', '=', tx.leagueId)
-    .forUpdate()
+    .forNoKeyUpdate()
     .executeTakeFirst();
   return row?.current_season_id ?? null;
 }

@@ -75,7 +75,7 @@ export async function lockSeasonOfTeam(tx: LeagueTx, teamId: string): Promise<st
     .select('s.id')
     .where('s.league_id', '=', tx.leagueId)
     .where('t.id', '=', teamId)
-    .forUpdate('s')
+    .forNoKeyUpdate('s')
     .executeTakeFirst();
   return row?.id;
 }

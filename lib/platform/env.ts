@@ -10,7 +10,8 @@ const schema = z.object({
     .enum(['0', '1'])
     .default('0')
     .transform((value) => value === '1'),
-  RAGLAN_DB_POOL: z.coerce.number().int().min(1).max(100).default(10),
+  /** A bundle and a reminder read on a second connection while they write on the first. */
+  RAGLAN_DB_POOL: z.coerce.number().int().min(4).max(100).default(10),
   /** How many reverse proxies stand in front: that many entries of X-Forwarded-For are believed, from the right. */
   RAGLAN_TRUSTED_PROXIES: z.coerce.number().int().min(0).max(10).default(0),
   SMTP_URL: z.string().optional(),

@@ -42,12 +42,14 @@ export async function readDivisionFields(
   return { fields: { name, ageBand, level, ruleSetId, leastPlayers, mostPlayers, freezesAt }, others };
 }
 
-/** Puts a division's own freeze on the worker's calendar; the season's freeze stands there already. */
+/**
+ * Puts a division's own freeze on the worker's calendar. Without one the season's counts, which stands there already but
+ * may have passed while the division had a later one: then the worker looks at once.
+ */
 export async function scheduleOwnFreeze(
   tx: LeagueTx,
   division: { id: string; seasonId: string; freezesAt: Date | null },
 ): Promise<void> {
-  if (division.freezesAt === null) return;
   await enqueueJob(
     tx,
     { task: 'freeze-rosters', payload: { leagueId: tx.leagueId, seasonId: division.seasonId } },

@@ -12,4 +12,5 @@ export const links = {
   join: (token: string) => link(`/join/${token}`),
   league: (slug: string) => link(`/${slug}`),
   roster: (league: string, season: string, team: string) => link(`/${league}/${season}/rosters/${team}`),
+  shopBatch: (league: string, code: string) => link(`/shop/${league}/${code.toLowerCase()}`),
 };

@@ -23,8 +23,9 @@ export function readRange(headers: Headers, bytes: number, etag: string): Range 
   return start >= bytes ? 'unsatisfiable' : { start, end };
 }
 
-/** Whether a request starts a download, as against fetching a further piece of one. */
-export const isFirstRange = (headers: Headers): boolean => /^bytes=0-|^$/.test(headers.get('range') ?? '');
+/** Whether a request may start a download: all but those that ask for a piece from further on, and say so plainly. */
+export const isFirstRange = (headers: Headers): boolean =>
+  !/^bytes=[1-9]\d*-\d*$/.test(headers.get('range')?.trim() ?? '');
 
 /** Streams an opened file as a download, whole or the range that was asked for; unchanged files answer 304. */
 export function streamFile(request: { headers: Headers }, file: OpenFile): Response {

@@ -93,6 +93,8 @@ export function describeEvent(event: AuditEvent): string {
       const { code, files, bytes } = event.data;
       return `built the bundle of batch ${code}: ${countOf(files, 'file')}, ${formatBytes(bytes)}`;
     }
+    case 'bundle queued again':
+      return `had the bundle of batch ${event.data.code} made again`;
     case 'bundle downloaded':
       return `downloaded ${event.data.file} of batch ${event.data.code}`;
     default:

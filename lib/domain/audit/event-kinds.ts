@@ -49,6 +49,7 @@ const kindOf: Record<AuditEvent['type'], EventKind> = {
   'batch released': 'batches',
   'batch marked': 'batches',
   'bundle built': 'batches',
+  'bundle queued again': 'batches',
   'bundle downloaded': 'batches',
 };
 

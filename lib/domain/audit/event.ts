@@ -61,6 +61,7 @@ export type AuditEvent =
     }
   | { type: 'batch marked'; subjectId: string; data: { code: string; from: string; to: string } }
   | { type: 'bundle built'; subjectId: string; data: { code: string; files: number; bytes: number } }
+  | { type: 'bundle queued again'; subjectId: string; data: { code: string } }
   | { type: 'bundle downloaded'; subjectId: string; data: { code: string; file: string } };
 
 /** One edit of a roster: a cell with both values, or a player added, removed or moved. */

@@ -19,8 +19,8 @@ export async function askForAccount(
   ctx: RequestContext,
   input: z.output<typeof askForAccountSchema> & { address: string },
 ): Promise<void> {
-  await spend(budgets.askAccount.account, input.email, 'This address was sent several letters already.');
   await spend(budgets.askAccount.address, input.address, 'Too many accounts were asked for from here.');
+  await spend(budgets.askAccount.account, input.email, 'This address was sent several letters already.');
   const known = await withEmail(input.email, (tx) => findAccountByEmail(tx, input.email));
   const token = newToken();
   const tokenHash = hashToken(token);

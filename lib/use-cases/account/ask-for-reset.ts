@@ -21,8 +21,8 @@ export async function askForReset(
   ctx: RequestContext,
   input: z.output<typeof askForResetSchema> & { address: string },
 ): Promise<void> {
-  await spend(budgets.askReset.account, input.email, 'This address was sent several letters already.');
   await spend(budgets.askReset.address, input.address, 'Too many letters were asked for from here.');
+  await spend(budgets.askReset.account, input.email, 'This address was sent several letters already.');
   const account = await withEmail(input.email, (tx) => findAccountByEmail(tx, input.email));
   const userId = account?.id ?? ctx.newId();
   const token = newToken();

@@ -26,8 +26,9 @@ export async function signIn(
 
   // The points are taken before the password is looked at: of a hundred tries at once, ten are looked at.
   try {
-    await spend(budgets.signIn.account, email, tooMany);
+    // The address pays first, so that one which has nothing left cannot spend what belongs to accounts.
     await spend(budgets.signIn.address, input.address, tooMany);
+    await spend(budgets.signIn.account, email, tooMany);
   } catch (error) {
     if (error instanceof AppError)
       await note(null, { type: 'sign-in refused', data: { because: 'throttled' } });

@@ -1,4 +1,4 @@
-import { insertAuditEvent } from '@/db/queries/audit';
+import { hasAuditEventSince, insertAuditEvent } from '@/db/queries/audit';
 import { findBundle, listBundleParts } from '@/db/queries/bundles';
 import { readStoredFile } from '@/db/queries/stored-files';
 import { withLeague } from '@/db/tenant';
@@ -14,6 +14,8 @@ export type OpenFile = {
   sha256: string;
   read: (range: { start: number; end: number }) => AsyncGenerator<Uint8Array>;
 };
+
+const oneDayMs = 24 * 60 * 60 * 1000;
 
 /**
  * Opens the ZIP of a batch (`path` null) or one of its files. Notes in the history who took what, once per download
@@ -43,12 +45,16 @@ export async function openBundleFile(
           }
         : (await listBundleParts(tx, bundle.id)).find((part) => part.path === input.path);
     if (!file) throw notFound('file');
-    if (input.isFirstRange) {
-      await insertAuditEvent(
-        tx,
-        { ...ctx, userId: ctx.actor.userId },
-        { type: 'bundle downloaded', subjectId: batch.id, data: { code: batch.code, file: file.path } },
-      );
+    const event = {
+      type: 'bundle downloaded' as const,
+      subjectId: batch.id,
+      data: { code: batch.code, file: file.path },
+    };
+    const { userId } = ctx.actor;
+    const since = new Date(ctx.now.getTime() - oneDayMs);
+    // A further piece belongs to the download noted before it; without one it is a download of its own.
+    if (input.isFirstRange || !(await hasAuditEventSince(tx, { event, userId, since }))) {
+      await insertAuditEvent(tx, { ...ctx, userId }, event);
     }
     return {
       name: file.path.split('/').at(-1) ?? file.path,

@@ -1,3 +1,4 @@
+import { insertAuditEvent } from '@/db/queries/audit';
 import { findBatchById } from '@/db/queries/batches';
 import { lockBundle, updateBundleState } from '@/db/queries/bundles';
 import { enqueueJob } from '@/db/queries/jobs';
@@ -25,6 +26,11 @@ export async function rebuildBundle(
       tx,
       { task: 'build-bundle', payload: { leagueId: ctx.league.id, batchId: batch.id } },
       { key: `bundle:${batch.id}`, runAt: null },
+    );
+    await insertAuditEvent(
+      tx,
+      { ...ctx, userId: ctx.actor.userId },
+      { type: 'bundle queued again', subjectId: batch.id, data: { code: batch.code } },
     );
     return { queued: true };
   });

@@ -10,11 +10,11 @@ import { batchSnapshotSchema } from '@/lib/domain/batch/batch-snapshot';
 import { writeCanonicalJson } from '@/lib/domain/batch/canonical-json';
 import { makeSnapshot } from '@/lib/domain/batch/make-snapshot';
 import { checkRoster } from '@/lib/domain/rules/check-roster';
-import { getEnv } from '@/lib/platform/env';
 import { AppError } from '@/lib/platform/errors';
 import { sha256, sha256Bytes } from '@/lib/platform/ids';
 import { lockHeldBatch } from '../batch-guards';
 import { assertCan, type ActorContext } from '../context';
+import { links } from '../links';
 
 /**
  * Releases a held batch: freezes its rosters, keeps everything the shop needs as one unchangeable snapshot, queues
@@ -48,9 +48,8 @@ export async function releaseBatch(ctx: ActorContext, input: { batchId: string }
       if (team.roster.state !== 'signed off' && team.roster.state !== 'frozen')
         return [`${team.name} is ${team.roster.state}`];
       // Rules may have changed since the sign-off; what is pressed must pass the ones in force now.
-      const blockers = division.rules
-        ? checkRoster(division.rules.ruleSet, list, division.garments).summary.blockers
-        : 0;
+      if (division.rules === null) return [`${division.name} has no number rules in force`];
+      const { blockers } = checkRoster(division.rules.ruleSet, list, division.garments).summary;
       return blockers > 0
         ? [
             `${team.name} has ${blockers} ${blockers === 1 ? 'blocker' : 'blockers'} under the rules now in force`,
@@ -118,7 +117,7 @@ export async function releaseBatch(ctx: ActorContext, input: { batchId: string }
       subjectId: batch.id,
       data: { code: batch.code, teams: teams.length, players: count, sha256: digest },
     });
-    const link = `${getEnv().RAGLAN_BASE_URL}/shop/${ctx.league.slug}/${batch.code.toLowerCase()}`;
+    const link = links.shopBatch(ctx.league.slug, batch.code);
     for (const { email } of await listShopAddresses(tx, batch.shop.id)) {
       const params = { league: ctx.league.name, batch: batch.code, teams: String(teams.length), link };
       await queueEmail(tx, ctx, email, { template: 'batch-released', params });

@@ -7,7 +7,10 @@ export const historyQuerySchema = z.object({
   search: z.string().trim().max(100).catch('').default(''),
   before: z
     .string()
-    .regex(/^\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d\.\d{3}Z_[0-9a-f-]{36}$/)
+    .refine((text) => {
+      const [at, id, ...more] = text.split('_');
+      return more.length === 0 && z.iso.datetime().safeParse(at).success && z.uuid().safeParse(id).success;
+    })
     .nullable()
     .catch(null)
     .default(null),

@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import { insertAuditEvent } from '@/db/queries/audit';
 import { insertDraft, insertRuleSet, listRuleSets } from '@/db/queries/rule-sets';
+import { lockCurrentSeason } from '@/db/queries/seasons';
 import { withLeague } from '@/db/tenant';
 import { makeBlankRuleSet } from '@/lib/domain/rules/blank-rule-set';
 import { findCataloguePreset } from '@/lib/domain/rules/catalogue/catalogue';
@@ -17,6 +18,8 @@ export async function startRuleSet(
   const preset = input.presetId === null ? null : findCataloguePreset(input.presetId);
   if (preset === undefined) throw notFound('preset in the catalogue');
   return withLeague(ctx.league.id, async (tx) => {
+    // The league's row is the lock: of two presses at once, the second finds the name taken.
+    await lockCurrentSeason(tx);
     const taken = (await listRuleSets(tx)).some(
       (ruleSet) => ruleSet.name.toLowerCase() === input.name.toLowerCase(),
     );

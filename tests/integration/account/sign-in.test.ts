@@ -53,6 +53,23 @@ describe('signing in', () => {
     expect(await outcome(person.email, person.password, '198.51.100.99')).toBe('throttled');
   });
 
+  it('lets an address that has no tries left spend none of an account’s', async () => {
+    const [person, from] = [await makePerson(), '203.0.113.200'];
+    await Promise.all(
+      Array.from({ length: 50 }, (_, at) => outcome(`nobody-${at}@club.example`, 'guess', from)),
+    );
+    const tries = await Promise.all(Array.from({ length: 15 }, () => outcome(person.email, 'guess', from)));
+    expect(new Set(tries)).toEqual(new Set(['throttled']));
+    expect(await outcome(person.email, person.password, '198.51.100.98')).toBe(person.id);
+  });
+
+  it('takes an address of 254 letters, and keeps none of it', async () => {
+    const email = `${'a'.repeat(64)}@${'b'.repeat(181)}.example`;
+    expect(await outcome(email, 'guess', '198.51.100.97')).toBeNull();
+    const kept = await queryAsAdmin<{ key: string }>('select key from rate_limits');
+    expect(kept.filter(({ key }) => key.includes('@') || key.includes('198.51.100.97'))).toEqual([]);
+  });
+
   it('throttles an address without an account exactly like one with', async () => {
     const tries = await Promise.all(
       Array.from({ length: 15 }, (_, at) => outcome('ghost@club.example', 'guess', `203.0.113.${at}`)),

@@ -282,6 +282,18 @@ describe('who gets a bundle', () => {
     );
   });
 
+  it('is noted too when somebody asks for a piece alone, with no download before it', async () => {
+    const released = await releaseOne();
+    await build(released);
+    const { world, code, batchId } = released;
+    await openBundleFile(world.decorator, { code, path: null, isFirstRange: true });
+    await openBundleFile(world.admin, { code, path: null, isFirstRange: false });
+    await openBundleFile(world.decorator, { code, path: 'manifest.json', isFirstRange: false });
+    expect(await count(`audit_events where subject_id = '${batchId}' and type = 'bundle downloaded'`)).toBe(
+      3,
+    );
+  });
+
   it('hides from a shop that a batch is being held for it, however its bundle is asked for', async () => {
     const [world] = await buildWorld();
     const { code } = await holdBatch(world.admin, {

@@ -6,6 +6,7 @@ import { releaseBatch } from '@/lib/use-cases/batches/release-batch';
 import { sha256 } from '@/lib/platform/ids';
 import { writeCanonicalJson } from '@/lib/domain/batch/canonical-json';
 import { putInForce } from '@/lib/use-cases/rule-sets/put-in-force';
+import { startRuleSet } from '@/lib/use-cases/rule-sets/start-rule-set';
 import { saveDraft } from '@/lib/use-cases/rule-sets/save-draft';
 import { saveRosterEdits } from '@/lib/use-cases/rosters/save-roster-edits';
 import { buildMember, buildTeam, buildWorld, type FurnishedLeague } from '../../factories/league';
@@ -145,6 +146,21 @@ describe('the release of a batch', () => {
     await expect(release()).rejects.toMatchObject({
       code: 'conflict',
       message: expect.stringContaining('under the rules now in force') as unknown,
+    });
+    expect(await traces()).toEqual(before);
+  });
+
+  it('is refused while a division has no number rules in force, since nothing could be checked', async () => {
+    const { ruleSetId } = await startRuleSet(world.admin, {
+      name: 'Only a draft',
+      sport: 'basketball',
+      presetId: null,
+    });
+    await queryAsAdmin('update divisions set rule_set_id = $1 where id = $2', [ruleSetId, world.division.id]);
+    const before = await traces();
+    await expect(release()).rejects.toMatchObject({
+      code: 'conflict',
+      message: expect.stringContaining('has no number rules in force') as unknown,
     });
     expect(await traces()).toEqual(before);
   });

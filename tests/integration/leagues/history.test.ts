@@ -97,6 +97,19 @@ describe('the history of a league', () => {
     expect((await ask(league)).lines).toEqual([]);
   });
 
+  it('begins at the newest when its address names a moment or an event that cannot be', () => {
+    const id = '0192f7a0-0000-7000-8000-000000000000';
+    const read = (before: string) => historyQuerySchema.parse({ before }).before;
+    expect(read(`2027-09-01T10:00:00.000Z_${id}`)).not.toBeNull();
+    for (const before of [
+      `2027-99-99T10:00:00.000Z_${id}`,
+      `2027-09-01T10:00:00.000Z_${'-'.repeat(36)}`,
+      'x',
+      `${id}_${id}`,
+    ])
+      expect(read(before), before).toBeNull();
+  });
+
   it('is for league admins', async () => {
     const league = await makeStaffedLeague();
     const referee = await makePerson();

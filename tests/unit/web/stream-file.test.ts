@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { readRange, streamFile } from '@/lib/web/stream-file';
+import { isFirstRange, readRange, streamFile } from '@/lib/web/stream-file';
 
 const data = new TextEncoder().encode('0123456789');
 const file = {
@@ -70,6 +70,22 @@ describe('a download', () => {
         expect(first + second).toBe('0123456789');
       }),
     );
+  });
+
+  it('counts as begun by every request but one that plainly asks for a further piece', () => {
+    const begins = (range?: string) => isFirstRange(new Headers(range === undefined ? {} : { range }));
+    for (const range of [
+      undefined,
+      '',
+      'bytes=0-',
+      'bytes=0-5',
+      'bytes=-99999',
+      'bytes= 0-',
+      'items=0-5',
+      'bytes=5-6,8-9',
+    ])
+      expect(begins(range), range).toBe(true);
+    for (const range of ['bytes=1-', 'bytes=500-999']) expect(begins(range), range).toBe(false);
   });
 
   it('reads any header without throwing', () => {

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { notFound } from '@/lib/platform/errors';
 import { openBundleFile } from '@/lib/use-cases/batches/open-bundle-file';
 import { defineRoute } from '@/lib/web/route';
 import { isFirstRange, streamFile } from '@/lib/web/stream-file';
@@ -12,10 +13,19 @@ export const GET = defineRoute({
     path: z.array(z.string().max(300)).min(1).max(10),
   }),
   run: async (ctx, { params, request }) => {
-    const path = params.path.map(decodeURIComponent).join('/');
+    const path = readPath(params.path);
     return streamFile(
       request,
       await openBundleFile(ctx, { code: params.batch, path, isFirstRange: isFirstRange(request.headers) }),
     );
   },
 });
+
+/** The path of a file as its address writes it; one that is no text at all names no file. */
+function readPath(parts: readonly string[]): string {
+  try {
+    return parts.map(decodeURIComponent).join('/');
+  } catch {
+    throw notFound('file');
+  }
+}
