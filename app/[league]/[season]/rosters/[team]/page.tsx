@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { getRoster } from '@/lib/use-cases/rosters/get-roster';
 import { paths } from '@/lib/web/paths';
 import { requireLeague } from '@/lib/web/session';
@@ -15,17 +16,21 @@ import {
 
 type Props = { params: Promise<{ league: string; season: string; team: string }> };
 
+/** Read once for the title and the page of one request. */
+const readRoster = cache(async (league: string, season: string, team: string) => {
+  const { ctx } = await requireLeague(league, paths.roster(league, season, team));
+  return { ctx, roster: await showNotFound(getRoster(ctx, { season, team })) };
+});
+
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
   const { league, season, team } = await params;
-  const { ctx } = await requireLeague(league, paths.roster(league, season, team));
-  const roster = await showNotFound(getRoster(ctx, { season, team }));
+  const { roster } = await readRoster(league, season, team);
   return { title: `${roster.team.name}, roster` };
 }
 
 export default async function RosterPage({ params }: Props) {
   const { league, season, team } = await params;
-  const { ctx } = await requireLeague(league, paths.roster(league, season, team));
-  const roster = await showNotFound(getRoster(ctx, { season, team }));
+  const { ctx, roster } = await readRoster(league, season, team);
   return (
     <RosterEditor
       key={roster.id}
