@@ -1,4 +1,5 @@
 import type { BatchSnapshot } from '@/lib/domain/batch/batch-snapshot';
+import { makeSlug, makeUniqueSlug } from '@/lib/domain/league/slug';
 import { writeTableCsv, writeTableJson } from './machine/data-table';
 import { writeReadMe } from './machine/read-me';
 import { tabulateDigits, tabulateGarments, tabulatePackingList, tabulatePieces } from './machine/tables';
@@ -119,6 +120,9 @@ function finishPart({ make, ...part }: Making): BundlePart {
   };
 }
 
+/** Names that Windows keeps for devices, whatever follows the dot (naming rules of its file systems; from memory). */
+const deviceName = /^(?:con|prn|aux|nul|com\d|lpt\d)$/;
+
 /**
  * A file name for each team, from its slug: small letters, digits and hyphens only, so that no name leaves its folder or
  * fails on another system, and no two alike.
@@ -126,14 +130,8 @@ function finishPart({ make, ...part }: Making): BundlePart {
 function makeSlugs(snapshot: BatchSnapshot): string[] {
   const taken = new Set<string>();
   return snapshot.teams.map((team, at) => {
-    const plain = team.slug
-      .toLowerCase()
-      .replace(/[^a-z0-9]+/g, '-')
-      .replace(/^-+|-+$/g, '')
-      .slice(0, 60);
-    const base = plain === '' ? `team-${at + 1}` : plain;
-    let slug = base;
-    for (let turn = 2; taken.has(slug); turn += 1) slug = `${base}-${turn}`;
+    const plain = makeSlug(team.slug, `team-${at + 1}`);
+    const slug = makeUniqueSlug(deviceName.test(plain) ? `${plain}-team` : plain, plain, taken);
     taken.add(slug);
     return slug;
   });

@@ -12,7 +12,20 @@ export const anyText = fc.oneof(
     unit: fc.integer({ min: 0, max: 0xffff }).map((unit) => String.fromCharCode(unit)),
     maxLength: 8,
   }),
-  fc.constantFrom('', ' ', '\u200f', 'مريم', 'e\u0301', '👩‍👩‍👧', '=1+1', '٧', '７', 'Ñ'.repeat(80), '__proto__'),
+  fc.constantFrom(
+    '',
+    ' ',
+    '\u200f',
+    'مريم',
+    'e\u0301',
+    'e\u200b\u0301',
+    '👩‍👩‍👧',
+    '=1+1',
+    '٧',
+    '７',
+    'Ñ'.repeat(80),
+    '__proto__',
+  ),
 );
 
 const numberText = fc.oneof(

@@ -1,4 +1,5 @@
 import type { BatchSnapshot } from '@/lib/domain/batch/batch-snapshot';
+import { contrastRatio } from '@/lib/domain/colour/contrast-ratio';
 import { listPieces } from '@/lib/domain/packing/list-pieces';
 import {
   pullDigits,
@@ -150,7 +151,6 @@ function drawCard(
 /** The kit's outline as it will look; without one a dark line keeps a light digit in sight on white paper. */
 function chooseOutline(pull: DigitPull): { colour: string; width: number } | undefined {
   if (pull.outline !== null) return { colour: pull.outline, width: 1.5 };
-  const brightness =
-    [1, 3, 5].reduce((sum, at) => sum + parseInt(pull.number.slice(at, at + 2), 16), 0) / 765;
-  return brightness > 0.7 ? { colour: dusk, width: 0.6 } : undefined;
+  // The least contrast of anything that is not text (WCAG 2.2, 1.4.11).
+  return contrastRatio(pull.number, '#ffffff') < 3 ? { colour: dusk, width: 0.6 } : undefined;
 }

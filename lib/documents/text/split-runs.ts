@@ -25,7 +25,7 @@ const mirrored: Record<string, string> = {
 /**
  * Cuts a text into runs in the order in which they are drawn, left to right. Directions follow the Unicode
  * Bidirectional Algorithm (UAX 9) as far as names need it: the first letter with a direction sets that of the line,
- * numbers read left to right, spaces and marks take the direction of both neighbours or else that of the line, and
+ * numbers read left to right and belong to left-to-right text before them, spaces and marks take the direction of both neighbours or else that of the line, and
  * brackets are mirrored; nested embeddings are not.
  */
 export function splitRuns(style: TypeStyle, text: string): TextRun[] {
@@ -54,18 +54,22 @@ function findLevels(letters: readonly string[]): { text: string; level: number }
           : 'neutral',
   );
   const base = kinds.find((kind) => kind === 'left' || kind === 'right') === 'right' ? 1 : 0;
-  let last = base;
-  const levels = kinds.map((kind): number | null => {
+  // Behind a left-to-right letter a number belongs to its text (UAX 9, rule W7).
+  let strong = base === 1 ? 'right' : 'left';
+  const resolved = kinds.map((kind) => {
+    if (kind === 'left' || kind === 'right') strong = kind;
+    return kind === 'number' && strong === 'left' ? 'left' : kind;
+  });
+  const levels = resolved.map((kind): number | null => {
     if (kind === 'neutral') return null;
-    if (kind === 'right') last = 1;
-    if (kind === 'left') last = base === 1 ? 2 : 0;
-    return kind === 'number' ? (last === 0 ? 0 : 2) : last;
+    if (kind === 'right') return 1;
+    return kind === 'left' && base === 0 ? 0 : 2;
   });
   // For what lies between, a number counts as part of the text around it (UAX 9, rule N1).
   const sideOf = (at: number, step: 1 | -1): number => {
     for (let i = at + step; i >= 0 && i < levels.length; i += step) {
       const level = levels[i];
-      if (level != null) return kinds[i] === 'number' && level === 2 ? 1 : level;
+      if (level != null) return resolved[i] === 'number' ? 1 : level;
     }
     return base;
   };

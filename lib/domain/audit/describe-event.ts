@@ -152,7 +152,9 @@ function showRosterChange(change: RosterChange): ShownChange {
   switch (change.kind) {
     case 'cell':
       return {
-        what: nameField(change.field.replace(/^sizes\./, 'size of ')),
+        what: change.field.startsWith('size:')
+          ? `size of ${change.field.slice('size:'.length)}`
+          : nameField(change.field),
         from: change.from,
         to: change.to,
       };

@@ -35,7 +35,9 @@ export function listKitsOfGarment(team: SnapshotTeam, garment: Garment): { kind:
 
 /** A player's size of a garment as code and words; both say so when there is none. */
 export function findSize(player: SnapshotPlayer, garment: Garment): { size: string; sizeLabel: string } {
-  const size = (player.sizes[garment.code] ?? '').trim();
+  // A garment may be called anything, `constructor` too.
+  const own = Object.hasOwn(player.sizes, garment.code) ? player.sizes[garment.code] : undefined;
+  const size = (own ?? '').trim();
   if (size === '') return { size, sizeLabel: noSize };
   return { size, sizeLabel: garment.sizes.find((entry) => entry.code === size)?.label ?? size };
 }

@@ -1,5 +1,5 @@
 import Papa from 'papaparse';
-import { readCell, makeEmptyEntry, writeCell } from './cells';
+import { listCells, readCell, makeEmptyEntry, writeCell } from './cells';
 import { cleanCellValue, refuseCell, type RosterEdit, type RosterEntry } from './edit';
 import { countOf } from '../text/count-of';
 import { unguardCell } from './import/formula-guard';
@@ -7,14 +7,17 @@ import { findSize } from './import/match-size';
 import { mostPlayersPerRoster } from './player';
 import type { RosterColumn } from './roster-columns';
 
+/** A spreadsheet ends the last row too; that line end begins no row of its own. */
+const withoutLastLineEnd = (text: string): string => text.replace(/(?:\r\n|\r|\n)$/, '');
+
 /** Cells as a spreadsheet puts them on the clipboard: tabs between cells, a line end after each row, quotes around line ends. */
 export function readBlock(text: string): string[][] {
-  const { data } = Papa.parse<string[]>(text.replace(/(?:\r\n|\r|\n)$/, ''), { delimiter: '\t' });
+  const { data } = Papa.parse<string[]>(withoutLastLineEnd(text), { delimiter: '\t' });
   return data;
 }
 
 /** Whether a text is more than one cell. */
-export const isBlock = (text: string): boolean => /[\t\r\n]/.test(text.trim());
+export const isBlock = (text: string): boolean => /[\t\r\n]/.test(withoutLastLineEnd(text));
 
 /** A typed or pasted value as its column keeps it: a size by its code when the kit offers it. */
 export function readValue(column: RosterColumn, text: string): string {
@@ -63,7 +66,8 @@ export function planPaste(given: {
         if (from !== to) edits.push({ kind: 'set', playerId: present.id, field: column.field, from, to });
       }
     }
-    if (present !== undefined || cells.every((text) => text.trim() === '')) continue;
+    // What found no place or was refused makes no player.
+    if (present !== undefined || listCells(fresh).length === 0) continue;
     if (count >= mostPlayersPerRoster) {
       unplaced += 1;
       continue;

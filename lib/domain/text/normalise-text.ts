@@ -9,11 +9,14 @@ const plain = /^[\x21-\x7e\u00c0-\u02af]+(?: [\x21-\x7e\u00c0-\u02af]+)*$/;
  */
 export function tidyText(text: string): string {
   if (plain.test(text)) return text;
-  return text
-    .normalize('NFC')
-    .replace(/(?![\u200c\u200d])\p{Cf}/gu, '')
-    .replace(/\p{White_Space}+/gu, ' ')
-    .replace(/^[ \u200c\u200d]+|[ \u200c\u200d]+$/g, '');
+  return (
+    text
+      .replace(/(?![\u200c\u200d])\p{Cf}/gu, '')
+      // Only now: an accent behind something invisible belongs to the letter before it.
+      .normalize('NFC')
+      .replace(/\p{White_Space}+/gu, ' ')
+      .replace(/^[ \u200c\u200d]+|[ \u200c\u200d]+$/g, '')
+  );
 }
 
 /**

@@ -2,7 +2,13 @@ import { z } from 'zod';
 import type { Garment } from '../player';
 import { isBlankRow } from './clean-cell';
 import { findHeadingRow, listHeadings } from './find-headings';
-import { findPlayerField, playerFields, readSizeHeading, type PlayerField } from './heading-words';
+import {
+  findPlayerField,
+  normaliseHeading,
+  playerFields,
+  readSizeHeading,
+  type PlayerField,
+} from './heading-words';
 import { fileLimits } from './limits';
 import { findSize } from './match-size';
 
@@ -126,12 +132,19 @@ function shareSizes(
   });
 }
 
-/** "Name" beside "First name" is the last name; a whole name beside both parts makes the parts extra. */
-function settleNames(columns: readonly ColumnTarget[]): ColumnTarget[] {
+/** Headings that say no more than "Name". */
+const bareNames = new Set(['name', 'names', 'naam']);
+
+/**
+ * A bare "Name" beside "First name" is the last name; a whole name ("Full name", "Player", or any beside both parts)
+ * makes the parts extra. `bare` tells of each column whether its heading is just "Name".
+ */
+function settleNames(columns: readonly ColumnTarget[], bare: readonly boolean[]): ColumnTarget[] {
   const has = (field: PlayerField): boolean => columns.some((target) => target.field === field);
   if (!has('name')) return [...columns];
   const isPart = ({ field }: ColumnTarget): boolean => field === 'firstName' || field === 'lastName';
-  if (has('firstName') !== has('lastName')) {
+  const isBare = columns.some((target, column) => target.field === 'name' && bare[column] === true);
+  if (isBare && has('firstName') !== has('lastName')) {
     const missing: PlayerField = has('firstName') ? 'lastName' : 'firstName';
     return columns.map((target) => (target.field === 'name' ? { field: missing } : target));
   }
@@ -212,7 +225,8 @@ export function guessMapping(
     if (field !== null) return { field };
     return sizes.garments.length > 0 ? { field: 'size', garments: sizes.garments } : { field: 'extra' };
   });
-  const named = claimOnce(settleNames(shareSizes(byHeading, plain, garments)));
+  const bare = header.map((heading) => bareNames.has(normaliseHeading(heading)));
+  const named = claimOnce(settleNames(shareSizes(byHeading, plain, garments), bare));
   const looks = headings.map((_, column) =>
     // A heading we can't read names something we don't know, so only unnamed columns are judged by their looks…
     headerRow !== null && (header[column] ?? '').trim() !== '' && named.some(({ field }) => field !== 'extra')

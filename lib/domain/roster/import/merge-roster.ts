@@ -142,6 +142,13 @@ export function planMerge(
     else if (player && !claimed.has(player.id)) {
       verdicts.set(row, { match: player });
       claimed.add(player.id);
+    } else if (decision?.as === 'player') {
+      verdicts.set(row, {
+        candidates: player ? [player] : [],
+        reason: player
+          ? 'another line was said to be this player already'
+          : 'the player chosen is not in the roster any more',
+      });
     }
   }
   const open = (): Player[] => existing.filter(({ id }) => !claimed.has(id));

@@ -82,11 +82,14 @@ function readKit(which: 'home' | 'away', cells: Cells, notes: string[]): TeamLin
 /** The e-mail addresses in a cell, each once, in lower case; anything else in it is said in `notes`. */
 function readManagers(text: string, notes: string[]): string[] {
   const pieces = text.split(/[\s,;<>()]+/).filter((piece) => piece !== '');
-  const addresses = pieces
-    .map((piece) => piece.toLowerCase())
-    .filter((piece) => addressSchema.safeParse(piece).success);
+  const isAddress = (piece: string) => addressSchema.safeParse(piece.toLowerCase()).success;
+  const addresses = pieces.filter(isAddress).map((piece) => piece.toLowerCase());
   if (text !== '' && addresses.length === 0) {
     notes.push(`${quoteText(text)} is no e-mail address, so nobody is invited for this team yet.`);
+  } else {
+    // A name beside its address is as usual; what was meant for an address is not passed over.
+    for (const piece of pieces.filter((entry) => entry.includes('@') && !isAddress(entry)))
+      notes.push(`${quoteText(piece)} is no e-mail address, so nobody is invited there.`);
   }
   return [...new Set(addresses)];
 }

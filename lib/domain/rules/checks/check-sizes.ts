@@ -1,3 +1,4 @@
+import { readCell } from '../../roster/cells';
 import { type Garment } from '../../roster/player';
 import { tidyText } from '../../text/normalise-text';
 import { joinWords, quoteText } from '../../text/sentence';
@@ -13,7 +14,7 @@ export const checkSizes: Check = ({ rules, players, garments }, findings) => {
   const offered = garments.map((garment) => new Set(garment.sizes.map((size) => size.code)));
   players.forEach((player, row) => {
     garments.forEach((garment, at) => {
-      const given = readOwn(player.sizes, garment.code);
+      const given = readCell(player, `size:${garment.code}`);
       if (offered[at]?.has(given)) return;
       const code = tidyText(given) === '' ? 'size-missing' : 'size-not-offered';
       const message =
@@ -23,10 +24,6 @@ export const checkSizes: Check = ({ rules, players, garments }, findings) => {
     });
   });
 };
-
-/** A garment may be called anything, `constructor` too. */
-const readOwn = (sizes: Record<string, string>, code: string): string =>
-  Object.hasOwn(sizes, code) ? (sizes[code] ?? '') : '';
 
 function notOffered(garment: Garment, given: string): string {
   const codes = garment.sizes.map((size) => size.code);

@@ -40,7 +40,7 @@ describe('runs of text', () => {
     expect(faces('Ειρήνη')).toEqual(['noto-400']);
     expect(faces('Ольга')).toEqual(['noto-400']);
     expect(faces('עמית')).toEqual(['hebrew-400']);
-    expect(faces('محمد علي')).toEqual(['arabic-400']);
+    expect(faces('سهيل الوادي')).toEqual(['arabic-400']);
   });
 
   it('are in drawing order from left to right where directions mix', () => {
@@ -48,6 +48,8 @@ describe('runs of text', () => {
     expect(drawn('עמית Levi')).toEqual(['Levi', 'עמית ']);
     expect(drawn('Levi עמית')).toEqual(['Levi ', 'עמית']);
     expect(drawn('עמית 42')).toEqual(['42', 'עמית ']);
+    expect(drawn('עמית Team 7')).toEqual(['Team 7', 'עמית ']);
+    expect(drawn('Team 7 עמית')).toEqual(['Team 7 ', 'עמית']);
     expect(drawn('Ana (עמית) Ruiz')).toEqual(['Ana (', 'עמית', ') Ruiz']);
   });
 

@@ -33,8 +33,8 @@ describe('the type case of a batch', () => {
 
   it('joins Arabic letters: a word has other glyphs than its letters alone', () => {
     const glyphs = (text: string) => type.shape('text', text).glyphs.map((glyph) => glyph.id);
-    const word = new Set(glyphs('محمد'));
-    expect([...'محمد'].flatMap(glyphs).filter((id) => word.has(id)).length).toBeLessThan(3);
+    const word = new Set(glyphs('سهيل'));
+    expect([...'سهيل'].flatMap(glyphs).filter((id) => word.has(id)).length).toBeLessThan(3);
   });
 
   it('keeps the zero-width non-joiner that Persian names are spelt with', () => {

@@ -68,7 +68,7 @@ describe('an event of the history', () => {
         subjectId,
         data: {
           team: 'Otters',
-          changes: [{ kind: 'cell', playerId: 'p', field: 'sizes.jersey', from: '', to: 'YM' }],
+          changes: [{ kind: 'cell', playerId: 'p', field: 'size:jersey', from: '', to: 'YM' }],
         },
       }),
     ).toEqual([{ what: 'size of jersey', from: '', to: 'YM' }]);

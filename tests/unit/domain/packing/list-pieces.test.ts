@@ -18,6 +18,12 @@ describe('pieces of a batch', () => {
     ]);
   });
 
+  it('have no size when none was given, also of a garment called like a property of every object', () => {
+    const garments = [makeGarment({ code: 'constructor', name: 'Constructor' })];
+    const team = makeTeam({ garments, players: [makePlayer(1, { sizes: {} })] });
+    expect(listPieces(makeSnapshotOf([team])).map(({ size }) => size)).toEqual(['', '']);
+  });
+
   it('are home pieces only for a team without an away kit', () => {
     const { home } = makeTeam().kits;
     const garments = [makeGarment(), makeGarment({ code: 'bag', name: 'Bag', worn: 'away' })];

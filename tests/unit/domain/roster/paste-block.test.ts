@@ -44,6 +44,19 @@ describe('a block pasted into a roster', () => {
     expect(problems).toEqual([]);
   });
 
+  it('is a block as soon as there is a tab, also before or behind an empty cell', () => {
+    expect(isBlock('\t7\r\n')).toBe(true);
+    expect(isBlock('A\t')).toBe(true);
+    expect(isBlock('Adisa, Wren\r\n')).toBe(false);
+    expect(paste('\t7').after[0]).toEqual(['', '7', 'YM']);
+  });
+
+  it('makes no player of a row whose only text found no place', () => {
+    const { edits, problems } = paste('\tx', 2, 2);
+    expect(edits).toEqual([]);
+    expect(problems[0]).toContain('beyond the last column');
+  });
+
   it('is read as a file is: numbers as labels, sizes by their names, guarded formulas as they were', () => {
     expect(paste("'=Wren\tNo. 07\tyouth large").after[0]).toEqual(['=Wren', '07', 'YL']);
     expect(paste('Wren\t７\tXXL').after[0]).toEqual(['Wren', '7', 'XXL']);

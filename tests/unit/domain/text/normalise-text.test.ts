@@ -9,6 +9,7 @@ describe('tidyText', () => {
   it('takes off what nobody sees and keeps what is read', () => {
     expect(tidyText('\ufeff  Pip\u00a0\t Dunmore\u200f ')).toBe('Pip Dunmore');
     expect(tidyText('e\u0301')).toBe('é');
+    expect(tidyText('e\u200b\u0301')).toBe('é');
     expect(tidyText('👩‍👧')).toBe('👩‍👧');
   });
 

@@ -26,6 +26,7 @@ describe('guessMapping', () => {
       'Vorname;Nachname;Rückennummer;Größe\nZoë;Marl;7;M',
       '0: firstName lastName number size(home-shirt+shorts)',
     ],
+    ['a full name beside the first name', 'Full name;First name;No\nAna Quill;Ana;7', '0: name extra number'],
     ['a name that is the last name', 'Vorname;Name;Nr\nZoë;Marl;7', '0: firstName lastName number'],
     [
       'French',

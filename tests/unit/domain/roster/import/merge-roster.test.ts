@@ -93,6 +93,18 @@ describe('planMerge', () => {
     expect(planMerge(namesakes, lines, new Map([[0, { as: 'new' }]])).added).toHaveLength(1);
   });
 
+  it('asks again when two lines are said to be one player, rather than take the second for another', () => {
+    const namesakes = [player('a', 'Pip Dunmore'), player('b', 'Pip Dunmore')];
+    const lines = [incoming('Pip Dunmore', '4'), incoming('Pip Dunmore', '5')];
+    const both = new Map([0, 1].map((row) => [row, { as: 'player' as const, id: 'a' }]));
+    const plan = planMerge(namesakes, lines, both);
+    expect(plan.changed.map(({ player: { id } }) => id)).toEqual(['a']);
+    expect(plan.ambiguous).toMatchObject([{ row: 1, candidates: [{ id: 'a' }] }]);
+    expect(plan.ambiguous[0]?.reason).toContain('already');
+    const gone = planMerge([], lines, new Map([[0, { as: 'player' as const, id: 'a' }]]));
+    expect(gone.ambiguous).toMatchObject([{ row: 0 }]);
+  });
+
   it('asks when two rows have the name of one player, and when a name stands the other way round', () => {
     const plan = planMerge(
       [player('a', 'Ana Quill')],

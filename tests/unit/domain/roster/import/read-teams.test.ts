@@ -72,6 +72,12 @@ describe('readTeams', () => {
     );
   });
 
+  it('says which of several addresses is none, and passes over the names beside them', () => {
+    const { lines } = read('Team;Division;Manager\nOtters;U12 Girls;Jo Lee <jo@tern.example>, bo@tern');
+    expect(lines[0]?.line.managers).toEqual(['jo@tern.example']);
+    expect(lines[0]?.notes).toEqual(['“bo@tern” is no e-mail address, so nobody is invited there.']);
+  });
+
   it('leaves a team in whose colour or address cannot be read, and says what was written', () => {
     const { lines } = read('Team;Division;Home colour;Manager\nOtters;U12 Girls;sea mist;call Jo');
     expect(lines[0]?.line).toMatchObject({ home: null, managers: [] });

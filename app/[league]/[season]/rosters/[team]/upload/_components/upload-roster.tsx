@@ -105,8 +105,10 @@ export function UploadRoster({
   // A line that was decided stays in sight, so that the answer can be changed.
   const doubts = useMemo(() => {
     const open = reading ? planMerge(roster.players, reading.lines).ambiguous : [];
-    const rows = new Set(open.map(({ row }) => row));
-    return [...open, ...(plan?.ambiguous ?? []).filter(({ row }) => !rows.has(row))];
+    const still = new Map((plan?.ambiguous ?? []).map((line) => [line.row, line]));
+    const asked = open.map((line) => ({ ...line, reason: still.get(line.row)?.reason ?? line.reason }));
+    for (const { row } of open) still.delete(row);
+    return [...asked, ...still.values()];
   }, [reading, roster.players, plan]);
   const merged = useMemo(() => {
     let added = 0;
