@@ -39,7 +39,7 @@ test('a coordinator signs a roster off, holds it in a batch, releases it, and th
 });
 
 test('every page of a coordinator is accessible and fits from 360 px up', async ({ page }) => {
-  test.setTimeout(180_000);
+  test.setTimeout(300_000);
   const errors = listenForErrors(page);
   await signIn(page, 'coordinator@tern.example');
   const { league, season } = await findSeason(page);
